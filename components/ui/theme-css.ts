@@ -72,6 +72,25 @@ const widths = `
 @media print{[data-show]:not([data-show="print"]),[data-print="no"]{display:none !important}}
 @media screen{[data-show="print"]{display:none !important}}`;
 
+const frames = `
+[data-skip-link]{position:absolute;left:16px;top:-100px;z-index:30;padding:12px 18px;background:var(--blue);color:var(--onBlue);font-weight:600}
+[data-skip-link]:focus{top:8px}
+[data-page]{padding:16px 16px 32px}
+@media (min-width:${breakpoint.phone}px){[data-page]{padding:20px 28px 40px}}
+[data-pane="aside"]{border-top:1.5px solid var(--ink) !important}
+[data-panes="work"]>[data-pane]{border-top:1px solid var(--ink) !important}
+[data-press]{cursor:pointer}
+[data-press]:hover{background:var(--well)}
+@media (min-width:${breakpoint.wide}px){
+[data-panes="yes"]{flex-direction:row !important;align-items:stretch !important}
+[data-pane="content"]{flex:1 1 0px !important}
+[data-pane="aside"]{flex:0 0 var(--aside) !important;border-top:0 !important;border-left:1.5px solid var(--ink) !important;
+position:sticky !important;top:0;height:100vh;height:100dvh;overflow-y:auto}
+[data-panes="work"]{flex-direction:row !important;height:calc(100vh - var(--below));height:calc(100dvh - var(--below))}
+[data-panes="work"]>[data-pane]{flex:var(--pane) !important;min-width:0;overflow-y:auto;border-top:0 !important}
+[data-panes="work"]>[data-pane]+[data-pane]{border-left:1.5px solid var(--ink) !important}
+}`;
+
 /** A table becomes stacked rows on a phone: each cell says its column's name. */
 const tables = `
 @media (max-width:${breakpoint.phone - 0.02}px){
@@ -85,4 +104,4 @@ align-items:baseline;gap:16px;padding:3px 0 3px 8px !important;border:0 !importa
 @media (min-width:${breakpoint.phone}px){[data-table="stack"] [data-part="label"]{display:none !important}}`;
 
 /** The style sheet of the whole application, put into the page's head by app/+html.tsx. */
-export const themeCss = [fontFaces, themes, base, widths, tables].join('\n');
+export const themeCss = [fontFaces, themes, base, frames, widths, tables].join('\n');
