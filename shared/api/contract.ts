@@ -51,10 +51,16 @@ export function contract<
   return c;
 }
 
-export type ParamsOf<C> = C extends Contract<infer P, z.ZodType, z.ZodType, z.ZodType> ? z.output<P> : never;
-export type QueryOf<C> = C extends Contract<z.ZodType, infer Q, z.ZodType, z.ZodType> ? z.output<Q> : never;
-export type BodyOf<C> = C extends Contract<z.ZodType, z.ZodType, infer B, z.ZodType> ? z.output<B> : never;
-export type ResponseOf<C> = C extends Contract<z.ZodType, z.ZodType, z.ZodType, infer R> ? z.output<R> : never;
+export type ParamsOf<C> =
+  C extends Contract<infer P, z.ZodType, z.ZodType, z.ZodType> ? z.output<P> : never;
+export type QueryOf<C> =
+  C extends Contract<z.ZodType, infer Q, z.ZodType, z.ZodType> ? z.output<Q> : never;
+export type BodyOf<C> =
+  C extends Contract<z.ZodType, z.ZodType, infer B, z.ZodType> ? z.output<B> : never;
+export type ResponseOf<C> =
+  C extends Contract<z.ZodType, z.ZodType, z.ZodType, infer R> ? z.output<R> : never;
 /** What a caller passes in (before defaults are filled in). */
-export type BodyInput<C> = C extends Contract<z.ZodType, z.ZodType, infer B, z.ZodType> ? z.input<B> : never;
-export type QueryInput<C> = C extends Contract<z.ZodType, infer Q, z.ZodType, z.ZodType> ? z.input<Q> : never;
+export type BodyInput<C> =
+  C extends Contract<z.ZodType, z.ZodType, infer B, z.ZodType> ? z.input<B> : never;
+export type QueryInput<C> =
+  C extends Contract<z.ZodType, infer Q, z.ZodType, z.ZodType> ? z.input<Q> : never;

@@ -1,0 +1,24 @@
+import { z } from 'zod';
+import { limits } from './limits';
+
+export const id = z.uuid();
+export const timestamp = z.iso.datetime({ offset: true });
+export const idParams = (name: string) => z.object({ [name]: id });
+export const okSchema = z.object({ ok: z.literal(true) });
+
+/** Keyset paging: pass the last page's `next` back. */
+export const pageQuery = z.object({
+  cursor: z.string().max(300).optional(),
+  limit: z.coerce.number().int().min(1).max(limits.pageSizeMax).default(limits.pageSize),
+});
+export const pageOf = <T extends z.ZodType>(item: T) =>
+  z.object({ items: z.array(item), next: z.string().nullable() });
+
+/** How a person is shown to others. */
+export const personRefSchema = z.object({
+  id,
+  handle: z.string(),
+  displayName: z.string(),
+  shopName: z.string().nullable(),
+});
+export type PersonRef = z.infer<typeof personRefSchema>;

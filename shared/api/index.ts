@@ -1,0 +1,17 @@
+import { accountContracts } from './accounts';
+import { benchContracts } from './bench';
+import { caseContracts } from './cases';
+import { type Contract } from './contract';
+import { mediaContracts } from './media';
+import { planContracts } from './plans';
+import { talkContracts } from './talk';
+
+/** Every route of the API. The server mounts exactly these; the OpenAPI document lists them. */
+export const contracts: readonly Contract[] = [
+  ...accountContracts,
+  ...planContracts,
+  ...mediaContracts,
+  ...benchContracts,
+  ...talkContracts,
+  ...caseContracts,
+] as unknown as readonly Contract[];
