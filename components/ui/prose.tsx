@@ -74,7 +74,7 @@ function block(token: Token, c: Context): ReactNode {
     case 'paragraph':
     case 'text':
       return (
-        <Text {...c.text} role="paragraph">
+        <Text {...c.text}>
           {token.tokens ? inlines(token.tokens, c) : plain((token as Tokens.Text).text)}
         </Text>
       );
