@@ -21,15 +21,15 @@ export function TitleBlock({
   rows: readonly (readonly TitleBlockCell[])[];
 }) {
   return (
-    <dl aria-label={label} style={frame}>
+    <div role="group" aria-label={label} style={frame}>
       {rows.map((cells, r) => (
-        <div key={r} style={{ ...row, borderTop: r ? `${line.thin}px solid ${colour.ink}` : 0 }}>
+        <dl key={r} style={{ ...row, borderTop: r ? `${line.thin}px solid ${colour.ink}` : 0 }}>
           {cells.map((cell, c) => (
             <Cell key={cell.label} cell={cell} divided={c > 0} />
           ))}
-        </div>
+        </dl>
       ))}
-    </dl>
+    </div>
   );
 }
 
@@ -69,4 +69,4 @@ const frame: CSSProperties = {
   border: `${line.medium}px solid ${colour.ink}`,
   background: colour.sheet,
 };
-const row: CSSProperties = { display: 'flex', flexDirection: 'row' };
+const row: CSSProperties = { margin: 0, display: 'flex', flexDirection: 'row' };

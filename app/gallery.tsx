@@ -1,0 +1,1 @@
+export { GalleryScreen as default } from '../components/ui/gallery/gallery-screen';
