@@ -1,0 +1,49 @@
+import { type PlanDocument } from '../document';
+
+export type RuleLevel = 'must' | 'should' | 'note';
+
+/** Where a row leads: which list of the plan, and which element in it. */
+export interface Place {
+  in:
+    | 'plan'
+    | 'steps'
+    | 'dimensions'
+    | 'checks'
+    | 'parts'
+    | 'stock'
+    | 'hardware'
+    | 'tools'
+    | 'links'
+    | 'photos'
+    | 'clip';
+  elementId: string | null;
+}
+
+/** One thing a rule found. */
+export interface Finding {
+  place: Place;
+  /** What is wrong, one sentence. */
+  message: string;
+  /** How to mend it, one sentence. */
+  cure: string;
+}
+
+/** One rule of the check sheet. It must be quiet unless it is right. */
+export interface Rule {
+  /** Stable, e.g. `parts/made`. */
+  id: string;
+  level: RuleLevel;
+  /** Where the rule comes from, for whoever asks. */
+  source: string;
+  run: (context: RuleContext) => Finding[];
+}
+
+/** What rules look at. */
+export interface RuleContext {
+  document: PlanDocument;
+}
+
+export const stepName = (document: PlanDocument, stepId: string): string => {
+  const at = document.steps.findIndex((s) => s.id === stepId);
+  return at < 0 ? 'a step' : `step ${at + 1}`;
+};
