@@ -1,4 +1,4 @@
-/** Three projects: pure shared code, the server on real services, and components in a DOM. */
+/** Four projects: pure shared code, the server on real services, components in a DOM, and the whole in a browser. */
 const swc = {
   '^.+\\.(t|j|mj)sx?$': [
     '@swc/jest',
@@ -13,7 +13,16 @@ const swc = {
   ],
 };
 // These ship ES modules only; Jest 29 needs them as CommonJS.
-const esmOnly = ['uuid', 'marked', 'file-type', 'strtok3', 'token-types', 'uint8array-extras', '@tokenizer', '@borewit'];
+const esmOnly = [
+  'uuid',
+  'marked',
+  'file-type',
+  'strtok3',
+  'token-types',
+  'uint8array-extras',
+  '@tokenizer',
+  '@borewit',
+];
 const transformIgnorePatterns = [`/node_modules/(?!(${esmOnly.join('|')})/)`];
 
 module.exports = {
@@ -36,6 +45,13 @@ module.exports = {
       displayName: 'app',
       preset: 'jest-expo/web',
       testMatch: ['<rootDir>/tests/components/**/*.test.tsx'],
+    },
+    {
+      displayName: 'browser',
+      testEnvironment: 'node',
+      testMatch: ['<rootDir>/tests/browser/**/*.test.ts'],
+      transform: swc,
+      transformIgnorePatterns,
     },
   ],
 };
