@@ -10,8 +10,19 @@ const rawPrimitives = {
 export default tseslint.config(
   {
     ignores: [
-      'node_modules/**', 'dist*/**', 'build/**', '.expo/**', '.local/**', 'coverage/**', 'public/**',
-      '**/*.generated.*', '*.cjs', 'babel.config.js', 'metro.config.js', 'expo-env.d.ts', 'tests/data/**',
+      'node_modules/**',
+      'dist*/**',
+      'build/**',
+      '.expo/**',
+      '.local/**',
+      'coverage/**',
+      'public/**',
+      '**/*.generated.*',
+      '*.cjs',
+      'babel.config.js',
+      'metro.config.js',
+      'expo-env.d.ts',
+      'tests/data/**',
     ],
   },
   ...tseslint.configs.recommendedTypeChecked.map((c) => ({ ...c, files: ['**/*.ts', '**/*.tsx'] })),
@@ -24,8 +35,14 @@ export default tseslint.config(
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/ban-ts-comment': 'error',
       '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
-      '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { attributes: false } }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_' },
+      ],
+      '@typescript-eslint/no-misused-promises': [
+        'error',
+        { checksVoidReturn: { attributes: false } },
+      ],
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
       'max-lines': ['error', { max: 400 }],
       'max-lines-per-function': ['error', { max: 60, skipBlankLines: true, skipComments: true }],

@@ -51,7 +51,7 @@ async function jest(name, project, ...extra) {
 }
 
 const eslintCache = join(root, 'node_modules/.cache/eslint/');
-const prettierCache = join(root, 'node_modules/.cache/prettier');
+const prettierCache = join(root, 'node_modules/.cache/prettier-check');
 const stages = {
   types: () =>
     check(
