@@ -1,0 +1,1 @@
+export { NewPasswordScreen as default } from '../../components/account/new-password-screen';

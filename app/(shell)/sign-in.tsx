@@ -1,0 +1,1 @@
+export { SignInScreen as default } from '../../components/account/sign-in-screen';

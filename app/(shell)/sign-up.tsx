@@ -1,0 +1,1 @@
+export { SignUpScreen as default } from '../../components/account/sign-up-screen';

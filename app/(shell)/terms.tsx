@@ -1,0 +1,1 @@
+export { TermsScreen as default } from '../../components/account/notices-screens';

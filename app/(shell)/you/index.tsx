@@ -1,0 +1,1 @@
+export { YouScreen as default } from '../../../components/account/you-screen';
