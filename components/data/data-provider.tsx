@@ -17,7 +17,13 @@ function Flusher(): null {
 export function DataProvider({ children }: { children: ReactNode }) {
   const [client] = useState(makeQueryClient);
   if (typeof indexedDB === 'undefined') {
-    return <QueryClientProvider client={client}>{children}</QueryClientProvider>;
+    // The same tree as below, or ids made while pre-rendering would not fit those in the browser.
+    return (
+      <QueryClientProvider client={client}>
+        <Flusher />
+        {children}
+      </QueryClientProvider>
+    );
   }
   return (
     <PersistQueryClientProvider

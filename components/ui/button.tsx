@@ -185,7 +185,7 @@ const styles = StyleSheet.create({
     cursor: 'pointer',
     userSelect: 'none',
   }),
-  own: { alignSelf: 'flex-start' },
+  own: webStyle({ width: 'fit-content', maxWidth: '100%' }),
   wide: { alignSelf: 'stretch' },
   words: { textAlign: 'center', flexShrink: 1 },
   quiet: webStyle({

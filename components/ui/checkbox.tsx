@@ -119,7 +119,7 @@ function Toggle({
 
 const styles = StyleSheet.create({
   column: { gap: 4 },
-  row: { flexDirection: 'row' },
+  row: { flexDirection: 'row', gap: 10 },
   target: webStyle({
     display: 'flex',
     flexDirection: 'row',

@@ -1,3 +1,5 @@
+import { numberWords } from '../../shared/plan/stick/number-words';
+
 /**
  * A figure taken apart for drawing. The measure engine hands these out; `parseFigure` makes one
  * from a plain text such as `2 3/4 in`, `-0.4 mm`, `± 1/32`, `12:22`.
@@ -39,20 +41,6 @@ export function parseFigure(text: string): FigureParts {
     ...(g.decimal && { decimal: g.decimal }),
     ...(g.unit && { unit: g.unit.trim() }),
   };
-}
-
-const small =
-  'zero one two three four five six seven eight nine ten eleven twelve thirteen fourteen fifteen sixteen seventeen eighteen nineteen'.split(
-    ' ',
-  );
-const tens = 'zero ten twenty thirty forty fifty sixty seventy eighty ninety'.split(' ');
-
-/** Cardinal in words below 100, digits from there on. */
-export function numberWords(n: number): string {
-  if (!Number.isInteger(n) || n < 0 || n > 99) return String(n);
-  if (n < 20) return small[n] ?? String(n);
-  const ten = tens[Math.floor(n / 10)] ?? '';
-  return n % 10 === 0 ? ten : `${ten}-${small[n % 10] ?? ''}`;
 }
 
 const parts: Record<number, [one: string, many: string]> = {

@@ -67,7 +67,7 @@ const styles = StyleSheet.create({
     display: 'flex',
     alignItems: 'center',
     justifyContent: 'center',
-    alignSelf: 'flex-start',
+    width: 'fit-content',
     borderRadius: radius.control,
     cursor: 'pointer',
   }),

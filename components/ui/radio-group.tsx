@@ -41,11 +41,19 @@ export function RadioGroup<V extends string>(props: ChoiceGroupProps<V>) {
               <View style={styles.ring}>
                 <RadioShape on={on} disabled={item.disabled ?? props.disabled} />
               </View>
-              <Text weight={item.help ? 600 : 400} style={item.help ? styles.name : styles.words}>
+              <Text
+                weight={item.help ? 600 : 400}
+                tone={item.disabled || props.disabled ? 'ink3' : 'ink'}
+                style={item.help ? styles.name : styles.words}
+              >
                 {item.children ?? item.label}
               </Text>
               {item.help ? (
-                <Text size="small" tone="ink2" style={styles.aside}>
+                <Text
+                  size="small"
+                  tone={item.disabled || props.disabled ? 'ink3' : 'ink2'}
+                  style={styles.aside}
+                >
                   {item.help}
                 </Text>
               ) : null}

@@ -85,16 +85,17 @@ export function KeyHint({ keys }: { keys: string }) {
 }
 
 const styles = StyleSheet.create({
-  box: {
+  box: webStyle({
+    display: 'flex',
     flexDirection: 'row',
     alignItems: 'center',
-    alignSelf: 'flex-start',
+    width: 'fit-content',
+    maxWidth: '100%',
     gap: 5,
-    paddingVertical: 2,
-    paddingHorizontal: 7,
+    padding: '2px 7px',
     borderWidth: line.thin,
     borderRadius: radius.tag,
-  },
+  }),
   dashed: { borderStyle: 'dashed' },
   pressable: webStyle({ display: 'flex', minHeight: 32, cursor: 'pointer' }),
   hovered: { backgroundColor: colour.well },
@@ -102,7 +103,7 @@ const styles = StyleSheet.create({
     display: 'inline-flex',
     alignItems: 'center',
     justifyContent: 'center',
-    alignSelf: 'flex-start',
+    width: 'fit-content',
     minWidth: 22,
     height: 22,
     paddingLeft: 5,
@@ -120,6 +121,5 @@ const styles = StyleSheet.create({
     borderColor: colour.rule,
     paddingHorizontal: 6,
     paddingVertical: 1,
-    alignSelf: 'center',
   },
 });

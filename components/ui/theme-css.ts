@@ -42,7 +42,7 @@ const themes = `
 :root,[data-theme="day"]{${day}}
 @media (prefers-color-scheme:dark){:root:not([data-theme="day"]){${night}}}
 [data-theme="night"]{${night}}
-[data-theme]:not(html){background:var(--film);color:var(--ink)}`;
+[data-theme]:not(html){background-color:var(--film) !important;color:var(--ink)}`;
 
 const base = `
 *,*::before,*::after{box-sizing:border-box}
@@ -76,21 +76,21 @@ const frames = `
 [data-skip-link]{position:absolute;left:16px;top:-100px;z-index:30;padding:12px 18px;background:var(--blue);color:var(--onBlue);font-weight:600}
 [data-skip-link]:focus{top:8px}
 #root{min-height:100vh;min-height:100dvh;display:flex;flex-direction:column}
-[data-rail="full"],[data-rail="narrow"]{position:sticky !important;top:0;height:100vh;height:100dvh;flex:none}
+[data-rail="full"],[data-rail="narrow"]{position:sticky !important;top:0;height:100vh;height:100dvh;flex:none !important}
 [data-rail="full"]{width:200px}
 [data-rail="narrow"]{width:56px}
 [data-rail="narrow"] [data-rail="words"]{position:absolute !important;width:1px;height:1px;overflow:hidden;clip-path:inset(50%)}
-[data-rail="link"]:hover{background:var(--well)}
+[data-rail="link"]:hover{background-color:var(--well) !important}
 @media (max-width:${breakpoint.wide - 0.02}px){[data-rail="full"]{width:56px}[data-rail="link"]{min-height:48px !important}
 [data-rail="full"] [data-rail="words"]{position:absolute !important;width:1px;height:1px;overflow:hidden;clip-path:inset(50%)}}
 @media (max-width:${breakpoint.phone - 0.02}px){[data-rail="full"],[data-rail="narrow"]{display:none !important}}
-[data-page]{padding:16px 16px 32px}
-@media (max-width:${breakpoint.phone - 0.02}px){[data-page]>[data-show="phone"]:first-of-type{margin:-16px -16px 0}}
-@media (min-width:${breakpoint.phone}px){[data-page]{padding:20px 28px 40px}}
+[data-page]{padding:16px 16px 32px !important}
+@media (max-width:${breakpoint.phone - 0.02}px){[data-page]>[data-show="phone"]:first-of-type{margin:-16px -16px 0 !important}}
+@media (min-width:${breakpoint.phone}px){[data-page]{padding:20px 28px 40px !important}}
 [data-pane="aside"]{border-top:1.5px solid var(--ink) !important}
 [data-panes="work"]>[data-pane]{border-top:1px solid var(--ink) !important}
 [data-press]{cursor:pointer}
-[data-press]:hover{background:var(--well)}
+[data-press]:hover{background-color:var(--well) !important}
 @media (min-width:${breakpoint.wide}px){
 [data-panes="yes"]{flex-direction:row !important;align-items:stretch !important}
 [data-pane="content"]{flex:1 1 0px !important}

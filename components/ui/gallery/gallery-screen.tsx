@@ -7,6 +7,7 @@ import { useMounted } from '../use-media';
 import { webStyle } from '../web-style';
 import { ChoicesSheet, InputsSheet, PickSheet } from './input-sheets';
 import { ButtonsSheet, MarksSheet, MenuSheet, TabsSheet } from './press-sheets';
+import { SticksSheet, TallSticksSheet } from './stick-sheets';
 import { GalleryStack } from './show-sheets';
 
 /** The server puts this in the page's head where development pages may be seen. */
@@ -36,6 +37,8 @@ function Theme({ name }: { name: 'day' | 'night' }) {
       <Heading level={2} ruled={false} size="heading">
         {name === 'day' ? 'Day' : 'Night'}
       </Heading>
+      <SticksSheet theme={name} />
+      <TallSticksSheet theme={name} />
       <ButtonsSheet />
       <InputsSheet />
       <PickSheet />
