@@ -1,0 +1,36 @@
+const { getDefaultConfig } = require('expo/metro-config');
+const { request } = require('node:http');
+
+const config = getDefaultConfig(__dirname);
+
+// `npm run dev`: the dev server passes on what is the API's, so that both are one origin and
+// cookies work as they do in the built product.
+const api = process.env.SCANTLING_API ? new URL(process.env.SCANTLING_API) : null;
+
+function passOn(incoming, outgoing) {
+  const { method, url: path, headers } = incoming;
+  const onward = request(
+    { host: api.hostname, port: api.port, method, path, headers },
+    (answer) => {
+      outgoing.writeHead(answer.statusCode, answer.headers);
+      answer.pipe(outgoing);
+    },
+  );
+  onward.on('error', () => {
+    if (!outgoing.headersSent) outgoing.writeHead(502, { 'Content-Type': 'text/plain' });
+    outgoing.end('The API does not answer yet. Try again in a moment.');
+  });
+  incoming.pipe(onward);
+}
+
+if (api !== null) {
+  config.server = {
+    ...config.server,
+    enhanceMiddleware: (metro) => (incoming, outgoing, next) =>
+      /^\/(api|media|local)(\/|\?|$)/.test(incoming.url ?? '')
+        ? passOn(incoming, outgoing)
+        : metro(incoming, outgoing, next),
+  };
+}
+
+module.exports = config;
