@@ -81,7 +81,10 @@ function Stretch({ step, previous, last }: StretchProps) {
   const dye = step.state === 'done';
   const current = step.state === 'current';
   const ink = current ? colour.blue : colour.ink;
-  const shapes = spreadShapes(step.verdicts.map((v) => v.verdict));
+  const hanging = spreadShapes(
+    step.verdicts.map((v) => v.verdict),
+    step.talk.length > 0,
+  );
   return (
     <View style={styles.side} aria-hidden>
       <View
@@ -99,7 +102,7 @@ function Stretch({ step, previous, last }: StretchProps) {
             <VerdictShape kind="fails" size={13} />
           </View>
         ) : null}
-        {shapes.map((s, i) => (
+        {hanging.shapes.map((s, i) => (
           <View key={i} style={[styles.hang, { top: `${s.share * 100}%` }]}>
             <View style={[styles.hangLine, { backgroundColor: colour.ink }]} />
             <View style={[styles.hangIn, { backgroundColor: dye ? colour.scribe : colour.ink }]} />
@@ -108,7 +111,7 @@ function Stretch({ step, previous, last }: StretchProps) {
             </View>
           </View>
         ))}
-        {step.talk.length ? <Note dye={dye} /> : null}
+        {hanging.note === null ? null : <Note dye={dye} share={hanging.note} />}
         {step.waits.length ? <Break running={step.waits.some((w) => w.running)} /> : null}
       </View>
     </View>
@@ -116,9 +119,9 @@ function Stretch({ step, previous, last }: StretchProps) {
 }
 
 /** A note hanging at the left, where talk belongs to the step. */
-function Note({ dye }: { dye: boolean }) {
+function Note({ dye, share }: { dye: boolean; share: number }) {
   return (
-    <View style={[styles.hang, styles.note]}>
+    <View style={[styles.hang, { top: `${share * 100}%` }]}>
       <Svg
         width={13}
         height={13}
@@ -179,11 +182,10 @@ const styles = StyleSheet.create({
   hangLine: { position: 'absolute', left: 0, top: 0, width: 5, height: line.thin },
   hangIn: { position: 'absolute', left: 5, top: 0, width: 8, height: line.thin },
   shape: { position: 'absolute', left: -11, top: -5 },
-  note: { top: '84%' },
   body: webStyle({ flex: 1, minWidth: 0, paddingBottom: 14, paddingLeft: 24, marginTop: -12 }),
   line: { flexDirection: 'row', alignItems: 'flex-start', gap: 8 },
   number: webStyle({ minWidth: 18, lineHeight: '24px' }),
-  title: webStyle({ flex: 1, lineHeight: '24px' }),
+  title: webStyle({ flex: 1, minWidth: 0, lineHeight: '24px' }),
   time: webStyle({ fontFamily: font.figures, lineHeight: '24px' }),
   below: { paddingLeft: 26, gap: 4 },
 });

@@ -124,11 +124,12 @@ const styles = StyleSheet.create({
     display: 'flex',
     flexDirection: 'row',
     minHeight: touch.min,
+    minWidth: 24,
     flexShrink: 1,
     gap: 10,
     cursor: 'pointer',
   }),
-  shape: { minHeight: touch.min, justifyContent: 'center', minWidth: 24 },
+  shape: { height: touch.min, justifyContent: 'center', minWidth: 24, alignSelf: 'flex-start' },
   words: { flexShrink: 1, paddingVertical: 11 },
   under: { marginTop: -6 },
 });

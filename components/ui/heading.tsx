@@ -69,7 +69,7 @@ export function Heading({
 }
 
 const styles = StyleSheet.create({
-  row: { flexDirection: 'row', alignItems: 'flex-end', gap: space.s12 },
+  row: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'flex-end', columnGap: space.s12 },
   ruled: { paddingBottom: 7 },
   words: { flexGrow: 1, flexShrink: 1 },
 });

@@ -57,7 +57,7 @@ export function TallSticksSheet({ theme }: { theme: string }) {
   const [at, setAt] = useState('s4');
   return (
     <Sheet title="At the bench and on a plan page" note="bench column 52">
-      <Row gap={24} align="flex-start">
+      <Row gap={24} align="flex-start" wrap>
         <View style={{ height: 600 }}>
           <BenchStick
             input={nineSteps}
@@ -77,7 +77,7 @@ export function TallSticksSheet({ theme }: { theme: string }) {
             height={600}
           />
         </View>
-        <View style={{ flex: 1, minWidth: 0 }}>
+        <View style={{ flexGrow: 1, flexShrink: 1, flexBasis: 280, minWidth: 0 }}>
           <PlanStick
             steps={nineSteps.steps}
             label={`Steps, ${theme}`}

@@ -41,16 +41,25 @@ export interface SpreadShape {
 /** Most shapes a stretch of text carries; beyond it the worst are kept. */
 const mostInRow = 3;
 
+/** Where one, two, three or four things stand in a stretch as long as its text. */
+const places = [[], [0.48], [0.28, 0.58], [0.24, 0.48, 0.72], [0.2, 0.4, 0.6, 0.8]] as const;
+
 /**
- * On a plan page a stretch is as long as its text, so its shapes stand in order and evenly: one at
- * 48 %, two at 28 and 58 %, three at 24, 48 and 72 %.
+ * On a plan page a stretch is as long as its text, so what hangs there stands in order and evenly:
+ * the shapes first, then the note where there is talk.
  */
-export function spreadShapes(verdicts: readonly StickVerdict[]): SpreadShape[] {
+export function spreadShapes(
+  verdicts: readonly StickVerdict[],
+  hasTalk = false,
+): { shapes: SpreadShape[]; note: number | null } {
   const kept = verdicts
     .map((verdict, i) => ({ verdict, i }))
     .sort((a, b) => rank(a.verdict) - rank(b.verdict) || a.i - b.i)
     .slice(0, mostInRow)
     .sort((a, b) => a.i - b.i);
-  const places = [[], [0.48], [0.28, 0.58], [0.24, 0.48, 0.72]][kept.length] ?? [];
-  return kept.map(({ verdict }, i) => ({ verdict, share: places[i] ?? 0.5 }));
+  const shares = places[kept.length + (hasTalk ? 1 : 0)] ?? [];
+  return {
+    shapes: kept.map(({ verdict }, i) => ({ verdict, share: shares[i] ?? 0.5 })),
+    note: hasTalk ? (shares[kept.length] ?? 0.5) : null,
+  };
 }
