@@ -41,6 +41,24 @@ export function run(program, args, { log, env = {}, cwd = root } = {}) {
   });
 }
 
+/** Starts a program that goes on until it is ended; its words go to the terminal. */
+export function keepRunning(program, args, { env = {} } = {}) {
+  const child = spawn(program, args, {
+    cwd: root,
+    env: { ...process.env, ...env },
+    stdio: ['ignore', 'inherit', 'inherit'],
+    detached: true,
+  });
+  running.add(child);
+  const ended = new Promise((resolve) => {
+    child.once('close', (code) => {
+      running.delete(child);
+      resolve(code ?? 1);
+    });
+  });
+  return { ended };
+}
+
 /** The last lines of a log, for a message. */
 export function tail(log, lines = 25) {
   return readFileSync(log, 'utf8').trimEnd().split('\n').slice(-lines).join('\n');
