@@ -44,12 +44,20 @@ module.exports = {
     {
       displayName: 'app',
       preset: 'jest-expo/web',
+      // The preset's own list, and what ships ES modules only.
+      transformIgnorePatterns: [
+        `/node_modules/(?!(react-native|@react-native|expo|@expo|react-navigation|@react-navigation|standard-navigation|${esmOnly.join('|')}))`,
+        '/node_modules/react-native-reanimated/plugin/',
+        '/node_modules/@react-native/babel-preset/',
+      ],
       testMatch: ['<rootDir>/tests/components/**/*.test.tsx'],
     },
     {
       displayName: 'browser',
       testEnvironment: 'node',
       testMatch: ['<rootDir>/tests/browser/**/*.test.ts'],
+      globalSetup: '<rootDir>/tests/browser/harness-setup.ts',
+      globalTeardown: '<rootDir>/tests/browser/harness-teardown.ts',
       transform: swc,
       transformIgnorePatterns,
     },

@@ -34,6 +34,6 @@ const styles = StyleSheet.create({
     minHeight: '100dvh',
     alignItems: 'stretch',
   }),
-  column: webStyle({ flex: '1 1 0px', minWidth: 0 }),
-  main: webStyle({ flex: '1 0 auto' }),
+  column: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
+  main: { flexGrow: 1, flexShrink: 0 },
 });

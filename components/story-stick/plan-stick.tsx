@@ -161,13 +161,15 @@ const styles = StyleSheet.create({
   stretch: webStyle({
     flex: 1,
     width: 24,
-    borderLeft: `${line.medium}px solid ${colour.ink}`,
-    borderRight: `${line.medium}px solid ${colour.ink}`,
+    borderLeftWidth: line.medium,
+    borderRightWidth: line.medium,
+    borderStyle: 'solid',
+    borderColor: colour.ink,
     backgroundColor: colour.sheet,
   }),
   dyed: { backgroundColor: colour.dye },
   current: { backgroundColor: colour.blueWash },
-  end: webStyle({ borderBottom: `${line.medium}px solid ${colour.ink}` }),
+  end: { borderBottomWidth: line.medium },
   mark: { position: 'absolute', left: -1.5, top: 0, width: 37.5 },
   scribe: {
     position: 'absolute',

@@ -8,7 +8,7 @@ import { type StickInput, type StickStep } from '../../shared/plan/stick/types';
 import { touch } from '../ui/tokens';
 import { webStyle } from '../ui/web-style';
 import { BlankStick } from './blank-stick';
-import { draftingStickKey, type StickDrafting } from './drafting-keys';
+import { draftingStickKey, useDraftingKeys, type StickDrafting } from './drafting-keys';
 import { frame, StickDrawing } from './stick-drawing';
 import { stickKey } from './stick-keys';
 import { useLength } from './use-length';
@@ -38,6 +38,7 @@ export interface StoryStickProps {
 export function StoryStick(props: StoryStickProps) {
   const { input, width } = props;
   const { length, onLayout } = useLength('width', width);
+  useDraftingKeys(props.drafting);
   return (
     <View onLayout={onLayout} style={[styles.measure, width !== undefined && { width }]}>
       {length > 0 && input.steps.length > 0 ? (

@@ -109,7 +109,7 @@ function Stacked({ numerator, denominator }: FractionProps) {
 const styles = StyleSheet.create({
   figure: webStyle({ whiteSpace: 'nowrap', fontStyle: 'normal' }),
   sign: webStyle({ marginRight: '0.05em' }),
-  point: webStyle({ margin: '0 -0.17em' }),
+  point: webStyle({ marginLeft: '-0.17em', marginRight: '-0.17em' }),
   unit: webStyle({
     fontFamily: font.text,
     fontWeight: 400,
@@ -124,7 +124,8 @@ const styles = StyleSheet.create({
     display: 'inline-block',
     width: '0.3em',
     height: '0.78em',
-    margin: '0 -0.055em 0 -0.065em',
+    marginLeft: '-0.065em',
+    marginRight: '-0.055em',
     verticalAlign: '-0.07em',
     overflow: 'visible',
   }),
@@ -138,8 +139,12 @@ const styles = StyleSheet.create({
     fontWeight: 600,
     lineHeight: '1em',
     textAlign: 'center',
-    borderBottom: 'max(1px, 0.085em) solid currentColor',
-    padding: '0 0.08em 0.06em',
+    borderBottomWidth: 'max(1px, 0.085em)',
+    borderBottomStyle: 'solid',
+    borderBottomColor: 'currentColor',
+    paddingLeft: '0.08em',
+    paddingRight: '0.08em',
+    paddingBottom: '0.06em',
   }),
   under: webStyle({ fontWeight: 600, lineHeight: '1em', textAlign: 'center', paddingTop: '0.1em' }),
 });

@@ -46,7 +46,7 @@ export function Link({
         style={style}
       >
         {children}
-        {newTab ? <VisuallyHidden> (opens in a new tab)</VisuallyHidden> : null}
+        {newTab ? <VisuallyHidden>{'\u00a0(opens in a new tab)'}</VisuallyHidden> : null}
       </RawText>
     );
   }
