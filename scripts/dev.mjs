@@ -34,7 +34,7 @@ try {
   const { createProduct } = loadTypeScript('server/local/product.ts');
   product = createProduct({ port, dataDir: local, webDir, server: 'apart' });
   for (const [name, work] of product.steps) await step(name, work);
-  const { apiPort, env } = product.apart();
+  const { apiPort, mailPort, env } = product.apart();
   const tsx = join(root, 'node_modules/tsx/dist/cli.mjs');
   const expo = join(root, 'node_modules/expo/bin/cli');
   const api = keepRunning('node', [tsx, 'watch', '--clear-screen=false', 'server/index.ts'], {
@@ -43,6 +43,7 @@ try {
   const app = keepRunning('node', [expo, 'start', '--port', String(port), '--localhost'], {
     env: {
       SCANTLING_API: `http://127.0.0.1:${apiPort}`,
+      SCANTLING_MAIL: `http://127.0.0.1:${mailPort}`,
       EXPO_NO_TELEMETRY: '1',
       EXPO_OFFLINE: '1',
       BROWSER: 'none',

@@ -23,7 +23,7 @@ export interface ServicesOptions {
   given: NodeJS.ProcessEnv;
 }
 
-export const localBucket = 'scantling-media';
+export const localBucket = 'scantling';
 
 type Stop = () => Promise<void>;
 type Names = 'postgres' | 'store' | 'mail';
@@ -94,8 +94,8 @@ export async function startServices({ dir, given }: ServicesOptions): Promise<Lo
       S3_ENDPOINT: running.endpoint,
       S3_BUCKET: localBucket,
       S3_REGION: 'us-east-1',
-      S3_ACCESS_KEY_ID: localStoreKeys.accessKeyId,
-      S3_SECRET_ACCESS_KEY: localStoreKeys.secretAccessKey,
+      S3_ACCESS_KEY: localStoreKeys.accessKeyId,
+      S3_SECRET_KEY: localStoreKeys.secretAccessKey,
       MEDIA_ORIGIN: running.endpoint,
     });
   };
