@@ -49,7 +49,8 @@ export function makeQueryClient(): QueryClient {
         // Asked even with no signal: the service worker or the cache may answer, and the error is honest.
         networkMode: 'always',
         retry: (count, error) => passing(error) && count < 2,
-        gcTime: 30 * 24 * 60 * minute,
+        // As long as the page lives: a timer of 30 days overflows setTimeout and would end at once.
+        gcTime: Infinity,
         refetchOnWindowFocus: false,
       },
       mutations: { networkMode: 'always', retry: false },
