@@ -27,7 +27,12 @@ export interface Product {
   /** In order, each with the name to show; a step may give a word for its line. */
   steps: [name: string, work: () => Promise<string | undefined>][];
   /** Where it is, once the steps are done. */
-  found(): { address: string; mail: string | null; signIns: DemoPerson[] };
+  found(): {
+    address: string;
+    databaseUrl: string;
+    mail: string | null;
+    signIns: DemoPerson[];
+  };
   /** For `server: 'apart'`: the port the API is expected on, and its environment. */
   apart(): { apiPort: number; mailPort: number; env: Record<string, string> };
   stop(): Promise<void>;
@@ -116,6 +121,7 @@ export function createProduct(options: ProductOptions): Product {
     steps,
     found: () => ({
       address: `http://127.0.0.1:${port}`,
+      databaseUrl: databaseUrl(),
       mail: services?.mail == null ? null : `http://127.0.0.1:${port}/local/mail`,
       signIns: givenDatabase ? [] : demoPeople(),
     }),
