@@ -95,7 +95,7 @@ async function main(): Promise<void> {
     const path = `/api/plans/${await firstSlug(product.found.address)}`;
     const urls = {
       ours: product.found.address + path,
-      bare: `http://127.0.0.1:${bare.port}${path}`,
+      bare: bare.found.address + path,
     };
     await measure(urls.ours);
     await measure(urls.bare);
