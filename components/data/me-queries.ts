@@ -21,6 +21,7 @@ import {
 import { call, type CallInput } from './api-client';
 import { adoptPreferences } from './preferences';
 import { keys, staleTimes } from './query-client';
+import { useMounted } from '../ui/use-media';
 
 /**
  * The person at this browser. With no signal the last known one counts (kept in IndexedDB), so guards
@@ -32,11 +33,13 @@ export function useMe(): { me: Me | null; known: boolean; failed: boolean } {
     queryFn: async ({ signal }) => (await call(getMe, { signal })).me,
     staleTime: staleTimes.me,
   });
-  const me = query.data ?? null;
+  // A route's chunk may hydrate after the answer came; until then the page must stay as pre-rendered.
+  const mounted = useMounted();
+  const me = mounted ? (query.data ?? null) : null;
   useEffect(() => {
     if (me) adoptPreferences(me.preferences);
   }, [me]);
-  return { me, known: query.data !== undefined, failed: query.isError };
+  return { me, known: mounted && query.data !== undefined, failed: mounted && query.isError };
 }
 
 function useSetMe() {

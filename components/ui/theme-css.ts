@@ -88,6 +88,9 @@ const frames = `
 @media (max-width:${breakpoint.phone - 0.02}px){[data-page]>[data-show="phone"]:first-of-type{margin:-16px -16px 0 !important}}
 @media (min-width:${breakpoint.phone}px){[data-page]{padding:20px 28px 40px !important}}
 [data-pane="aside"]{border-top:1.5px solid var(--ink) !important}
+[data-head]{padding:16px 16px 0 !important}
+[data-page] [data-head]{padding:0 !important}
+@media (min-width:${breakpoint.phone}px){[data-head]{padding:20px 28px 0 !important}}
 [data-panes="work"]>[data-pane]{border-top:1px solid var(--ink) !important}
 [data-press]{cursor:pointer}
 [data-press]:hover{background-color:var(--well) !important}
