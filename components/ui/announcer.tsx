@@ -146,6 +146,8 @@ const styles = StyleSheet.create({
     marginLeft: 'auto',
     marginRight: 'auto',
     zIndex: layer.toast,
+    borderWidth: 1.5,
+    borderColor: colour.film,
   }),
   words: { flexGrow: 1, flexShrink: 1, paddingVertical: 8 },
   press: webStyle({

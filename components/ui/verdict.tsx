@@ -3,8 +3,23 @@ import Svg, { Circle, Path, Rect } from 'react-native-svg';
 import { Text, type TextTone } from './text';
 import { colour } from './tokens';
 
-/** Worst last in none: the order of seriousness is in shared/plan/stick. */
+/** The five verdicts; their order of seriousness is `verdictOrder` in shared/plan/stick/shapes. */
 export type VerdictKind = 'holds' | 'risk' | 'fails' | 'need' | 'close';
+
+const kinds: Record<string, VerdictKind> = {
+  holds: 'holds',
+  'at-risk': 'risk',
+  risk: 'risk',
+  fails: 'fails',
+  'needs-a-reading': 'need',
+  need: 'need',
+  'too-close-to-call': 'close',
+  'too-close': 'close',
+  close: 'close',
+};
+
+/** The kind for a verdict as the check sheet and the readings name it (`at-risk`, `needs-a-reading` …). */
+export const verdictKind = (name: string): VerdictKind => kinds[name] ?? 'need';
 
 /** Shape, colour and word always go together; the words are the product's. */
 export const verdictLook: Record<VerdictKind, { word: string; tone: TextTone }> = {
