@@ -31,7 +31,7 @@ try {
   if (!process.env.DATABASE_URL) {
     await step('PostgreSQL installed', () => ensureDebian('postgresql', postgresThere));
   }
-  const { createProduct } = loadTypeScript('server/local/product.ts');
+  const { createProduct } = await loadTypeScript('server/local/product.ts');
   product = createProduct({ port, dataDir: local, webDir, server: 'apart' });
   for (const [name, work] of product.steps) await step(name, work);
   const { apiPort, mailPort, env } = product.apart();

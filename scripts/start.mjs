@@ -55,7 +55,7 @@ try {
     await step('PostgreSQL installed', () => ensureDebian('postgresql', postgresThere));
   }
   await step('web app', ensureWebApp);
-  const { createProduct } = loadTypeScript('server/local/product.ts');
+  const { createProduct } = await loadTypeScript('server/local/product.ts');
   product = createProduct({ port, dataDir: local, webDir });
   for (const [name, work] of product.steps) await step(name, work);
   sayWhereItIs(product.found());

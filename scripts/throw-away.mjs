@@ -9,7 +9,7 @@ process.env.RATE_FACTOR ??= '1000';
 process.env.LOG_LEVEL ??= 'error';
 for (const name of ['DATABASE_URL', 'S3_ENDPOINT', 'SMTP_URL']) delete process.env[name];
 
-const { createProduct } = loadTypeScript('server/local/product.ts');
+const { createProduct } = await loadTypeScript('server/local/product.ts');
 const product = createProduct({ port: Number(process.env.PORT ?? 0), webDir });
 let ending = false;
 async function end(status) {

@@ -3,9 +3,19 @@ import { join } from 'node:path';
 import { root } from './paths.mjs';
 
 const require = createRequire(import.meta.url);
+let ready = false;
 
 /** Loads one of the project's TypeScript files. Only after the packages are installed. */
-export function loadTypeScript(path) {
-  require('tsx/cjs/api').register();
+export async function loadTypeScript(path) {
+  if (!ready) {
+    const [forRequire, forImport] = await Promise.all([
+      import('tsx/cjs/api'),
+      import('tsx/esm/api'),
+    ]);
+    forRequire.register();
+    // For `import()` inside the files.
+    forImport.register();
+    ready = true;
+  }
   return require(join(root, path));
 }
