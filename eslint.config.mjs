@@ -61,6 +61,13 @@ export default tseslint.config(
     rules: { 'no-restricted-imports': ['error', { paths: [rawPrimitives] }] },
   },
   {
+    // Markup is long without being deep; logic stays at 60.
+    files: ['components/**/*.tsx', 'app/**/*.tsx'],
+    rules: {
+      'max-lines-per-function': ['error', { max: 100, skipBlankLines: true, skipComments: true }],
+    },
+  },
+  {
     files: ['tests/**/*.{ts,tsx}', '**/*.data.ts', 'server/db/migrations/**'],
     rules: { 'max-lines-per-function': 'off' },
   },

@@ -3,7 +3,9 @@ import { limits } from './limits';
 
 export const id = z.uuid();
 export const timestamp = z.iso.datetime({ offset: true });
-export const idParams = (name: string) => z.object({ [name]: id });
+/** Parameters of a path with one id in it. */
+export const idParams = <N extends string>(name: N) =>
+  z.object({ [name]: id } as Record<N, typeof id>);
 export const okSchema = z.object({ ok: z.literal(true) });
 
 /** Keyset paging: pass the last page's `next` back. */

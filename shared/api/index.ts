@@ -14,4 +14,4 @@ export const contracts: readonly Contract[] = [
   ...benchContracts,
   ...talkContracts,
   ...caseContracts,
-] as unknown as readonly Contract[];
+];

@@ -1,0 +1,1 @@
+export { CasesScreen as default } from '../../../components/cases/cases-screen';

@@ -1,0 +1,26 @@
+import { type Router } from 'express';
+import { type Deps } from '../deps';
+import { registerAccounts } from './accounts/accounts.routes';
+import { registerBench } from './bench/bench.routes';
+import { registerCases } from './cases/cases.routes';
+import { registerDrafts } from './drafts/drafts.routes';
+import { registerMedia } from './media/media.routes';
+import { registerPeople } from './people/people.routes';
+import { registerPlans } from './plans/plans.routes';
+import { registerTalk } from './talk/talk.routes';
+
+/** Mounts every feature's routes below /api. */
+export function registerFeatures(router: Router, deps: Deps): void {
+  for (const register of [
+    registerAccounts,
+    registerPlans,
+    registerDrafts,
+    registerMedia,
+    registerBench,
+    registerTalk,
+    registerCases,
+    registerPeople,
+  ]) {
+    register(router, deps);
+  }
+}

@@ -1,0 +1,33 @@
+import { type Express } from 'express';
+import { MediaEntity } from '../../db/entities/media';
+import { type PersonEntity } from '../../db/entities/person';
+import { type Deps } from '../../deps';
+import { missing } from '../../http/errors';
+import { isModerator, personOf } from '../../http/person';
+
+/** Its owner, everybody for what a published plan shows, holders of a bench copy, moderators. */
+async function maySee(deps: Deps, hash: string, person: PersonEntity | null): Promise<boolean> {
+  if (isModerator(person)) return true;
+  const rows: unknown[] = await deps.db.query(
+    `SELECT 1 FROM media_uses u JOIN plans p ON p.id = u.plan_id WHERE u.hash = $1
+       AND (p.state = 'published' OR p.owner_id = $2 OR EXISTS (SELECT 1 FROM bench_copies b WHERE b.plan_id = p.id AND b.person_id = $2))
+     UNION ALL SELECT 1 FROM media_owners WHERE hash = $1 AND person_id = $2 LIMIT 1`,
+    [hash, person?.id ?? null],
+  );
+  return rows.length > 0;
+}
+
+/** `/media/<hash>/<rendition>`: asks for permission, then leads to a signed address on the media origin. */
+export function registerMediaFiles(app: Express, deps: Deps): void {
+  app.get('/media/:hash/:rendition', async (req, res) => {
+    const { hash, rendition } = req.params;
+    const media = /^[0-9a-f]{64}$/.test(hash)
+      ? await deps.db.getRepository(MediaEntity).findOneBy({ hash })
+      : null;
+    const file = media?.renditions[rendition];
+    if (!media || !file || !(await maySee(deps, hash, personOf(req))))
+      throw missing('That picture or clip');
+    res.set('Cache-Control', 'private, max-age=900');
+    res.redirect(302, await deps.storage.signedUrl(file.key, file.type, deps.now()));
+  });
+}
