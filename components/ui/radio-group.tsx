@@ -193,7 +193,7 @@ const styles = StyleSheet.create({
   }),
   ring: { minWidth: 22 },
   words: { flexShrink: 1 },
-  name: { flexBasis: 112 },
+  name: { width: 112 },
   aside: { flexShrink: 1, flexGrow: 1 },
   frame: { flexDirection: 'row', borderWidth: line.medium, borderColor: colour.ink },
   segment: webStyle({
