@@ -138,7 +138,7 @@ function BenchDrawing({ id, layout, now, height }: DrawingProps) {
 
 function BenchMarks({ layout, now }: { layout: StickLayout; now: number | null }) {
   return layout.spans.map((s, i) => {
-    const number = benchNumberAt(s, now);
+    const number = benchNumberAt(s, now, layout.waits);
     const current = s.state === 'current';
     const ink = current ? colour.blue : colour.ink;
     const stroke = s.state === 'done' ? colour.scribe : ink;

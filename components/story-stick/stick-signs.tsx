@@ -51,7 +51,7 @@ export function Waits({ layout, ids, now }: WaitsProps) {
         {label ? (
           <SvgText
             x={left + label.at}
-            y={top + 16}
+            y={top + 12.5}
             textAnchor={label.anchor}
             fontFamily={font.figures}
             fontSize={11}

@@ -112,10 +112,31 @@ describe('numbers on the bench stick', () => {
     expect(benchNumberAt(span(100, 114), null)).toBeNull();
   });
   test('keep 12 px from the pointer, inside the stretch', () => {
-    const at = benchNumberAt(span(100, 176), 140) ?? 0;
-    expect(Math.abs(at - 140)).toBeGreaterThanOrEqual(12);
-    expect(at).toBeGreaterThan(107);
-    expect(at).toBeLessThan(169);
+    const place = fc.double({ min: 0, max: 600, noNaN: true });
+    fc.assert(
+      fc.property(
+        place,
+        fc.double({ min: 15, max: 200, noNaN: true }),
+        place,
+        (from, length, pointer) => {
+          const at = benchNumberAt(span(from, from + length), pointer);
+          if (at === null) return;
+          expect(Math.abs(at - pointer)).toBeGreaterThanOrEqual(12 - 1e-9);
+          expect(at).toBeGreaterThanOrEqual(from + 7.5 - 1e-9);
+          expect(at).toBeLessThanOrEqual(from + length - 7.5 + 1e-9);
+        },
+      ),
+    );
+  });
+  test('are left out where pointer and edges leave no room', () => {
+    expect(benchNumberAt(span(100, 130), 115)).toBeNull();
+  });
+  test('keep clear of a break', () => {
+    const wait = { at: 165, running: true, left: 60 };
+    const at = benchNumberAt(span(100, 176), 140, [wait]) ?? 0;
+    expect(at).toBeGreaterThanOrEqual(107.5);
+    expect(at).toBeLessThanOrEqual(128);
+    expect(benchNumberAt(span(100, 176), null, [wait])).toBe(130);
   });
 });
 
