@@ -1,3 +1,4 @@
+import '../components/data/no-eval';
 import { Slot } from 'expo-router';
 import { DataProvider } from '../components/data/data-provider';
 import { Announcer } from '../components/ui/announcer';

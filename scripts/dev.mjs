@@ -7,10 +7,11 @@ import { ensurePackages } from './lib/packages.mjs';
 import { local, root, webDir } from './lib/paths.mjs';
 import { ensureFree, wantedPort } from './lib/ports.mjs';
 import { endAll, keepRunning } from './lib/run.mjs';
-import { checkNode, sayFailure, step } from './lib/steps.mjs';
+import { checkNode, quietAboutNode, sayFailure, step } from './lib/steps.mjs';
 import { loadTypeScript } from './lib/typescript.mjs';
 
 checkNode();
+quietAboutNode();
 let product = null;
 let ending = false;
 

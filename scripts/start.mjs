@@ -6,11 +6,12 @@ import { ensurePackages } from './lib/packages.mjs';
 import { local, webDir } from './lib/paths.mjs';
 import { ensureFree, wantedPort } from './lib/ports.mjs';
 import { endAll } from './lib/run.mjs';
-import { checkNode, sayFailure, step } from './lib/steps.mjs';
+import { checkNode, quietAboutNode, sayFailure, step } from './lib/steps.mjs';
 import { loadTypeScript } from './lib/typescript.mjs';
 import { ensureWebApp } from './lib/web-app.mjs';
 
 checkNode();
+quietAboutNode();
 let product = null;
 let ending = false;
 

@@ -1,12 +1,13 @@
 // The product with demo data on services that vanish with it, for browser tests and benchmarks.
 // Prints one line of JSON when it is up; ends when its standard input does.
 import { webDir } from './lib/paths.mjs';
-import { sayFailure } from './lib/steps.mjs';
+import { quietAboutNode, sayFailure } from './lib/steps.mjs';
 import { loadTypeScript } from './lib/typescript.mjs';
 
 // Lets the demo's own work be done at test speed; the limits themselves have their API tests.
 process.env.RATE_FACTOR ??= '1000';
 process.env.LOG_LEVEL ??= 'error';
+quietAboutNode();
 for (const name of ['DATABASE_URL', 'S3_ENDPOINT', 'SMTP_URL']) delete process.env[name];
 
 const { createProduct } = await loadTypeScript('server/local/product.ts');

@@ -35,3 +35,8 @@ export function checkNode() {
   }
   if (major > 20) console.log(`Made for Node 20; this is ${process.versions.node}.`);
 }
+
+/** The S3 client warns of Node 20 at every start; its version is pinned with that in mind. */
+export function quietAboutNode() {
+  process.env.AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED ??= 'true';
+}

@@ -10,6 +10,8 @@ export default async function setUp(): Promise<void> {
   const child = spawn('node', [join(root, 'scripts/throw-away.mjs')], {
     cwd: root,
     stdio: ['pipe', 'pipe', 'inherit'],
+    // Jest says `test` here; the gallery and the mail pages show in development.
+    env: { ...process.env, NODE_ENV: 'development' },
   });
   scope.scantlingProduct = child;
   const found = await new Promise<{ address: string }>((resolve, reject) => {
