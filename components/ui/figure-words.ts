@@ -1,4 +1,4 @@
-import { numberWords } from '../../shared/plan/stick/number-words';
+import { fractionWords, numberWords } from '../../shared/measure/spoken';
 
 /**
  * A figure taken apart for drawing. The measure engine hands these out; `parseFigure` makes one
@@ -6,6 +6,8 @@ import { numberWords } from '../../shared/plan/stick/number-words';
  */
 export interface FigureParts {
   sign?: '−' | '+' | '±' | '-' | '';
+  /** Whole feet before the inches. */
+  feet?: string | number;
   /** Digits before a fraction, or the whole of a whole number. */
   whole?: string | number;
   numerator?: string | number;
@@ -41,24 +43,6 @@ export function parseFigure(text: string): FigureParts {
     ...(g.decimal && { decimal: g.decimal }),
     ...(g.unit && { unit: g.unit.trim() }),
   };
-}
-
-const parts: Record<number, [one: string, many: string]> = {
-  2: ['half', 'halves'],
-  3: ['third', 'thirds'],
-  4: ['quarter', 'quarters'],
-  8: ['eighth', 'eighths'],
-  10: ['tenth', 'tenths'],
-  16: ['sixteenth', 'sixteenths'],
-  32: ['thirty-second', 'thirty-seconds'],
-  64: ['sixty-fourth', 'sixty-fourths'],
-  128: ['one-hundred-and-twenty-eighth', 'one-hundred-and-twenty-eighths'],
-};
-
-function fractionWords(numerator: number, denominator: number): string {
-  const name = parts[denominator];
-  if (!name) return `${numberWords(numerator)} over ${numberWords(denominator)}`;
-  return `${numberWords(numerator)} ${numerator === 1 ? name[0] : name[1]}`;
 }
 
 const units: Record<string, [one: string, many: string]> = {

@@ -51,7 +51,16 @@ export function Figure({
       <VisuallyHidden>{speakFigure(f)}</VisuallyHidden>
       <RawText aria-hidden>
         {f.sign ? <RawText style={styles.sign}>{f.sign === '-' ? '−' : f.sign}</RawText> : null}
+        {f.feet ? (
+          <>
+            <Digits text={String(f.feet)} />
+            <Copied text=" " />
+            <RawText style={[styles.unit, styles.feet]}>ft</RawText>
+            <Copied text=" " />
+          </>
+        ) : null}
         {digits ? <Digits text={digits} /> : null}
+        {hasFraction && digits ? <Copied text=" " /> : null}
         {hasFraction ? (
           <Fraction
             numerator={String(f.numerator)}
@@ -60,11 +69,19 @@ export function Figure({
           />
         ) : null}
         {f.unit && !withoutUnit ? (
-          <RawText style={f.unit === '°' ? styles.degree : styles.unit}>{f.unit}</RawText>
+          <>
+            {f.unit === '°' ? null : <Copied text=" " />}
+            <RawText style={f.unit === '°' ? styles.degree : styles.unit}>{f.unit}</RawText>
+          </>
         ) : null}
       </RawText>
     </RawText>
   );
+}
+
+/** Takes no room, but a copied figure reads `2 3/4 in` and not `234in`. */
+function Copied({ text }: { text: string }) {
+  return <RawText style={styles.copied}>{text}</RawText>;
 }
 
 /** Digits with the points and colons pulled in, which in Mono would take a full cell. */
@@ -89,6 +106,7 @@ function Slanted({ numerator, denominator, bold }: FractionProps) {
   return (
     <RawText style={styles.slanted}>
       <RawText style={[styles.term, styles.raised, weight]}>{numerator}</RawText>
+      <Copied text="/" />
       <Svg viewBox="0 0 30 78" style={styles.stroke}>
         <Path d="M2 78 28 0" stroke="currentColor" strokeWidth={6.5} fill="none" />
       </Svg>
@@ -100,7 +118,10 @@ function Slanted({ numerator, denominator, bold }: FractionProps) {
 function Stacked({ numerator, denominator }: FractionProps) {
   return (
     <View style={styles.stacked}>
-      <RawText style={styles.over}>{numerator}</RawText>
+      <RawText style={styles.over}>
+        {numerator}
+        <Copied text="/" />
+      </RawText>
       <RawText style={styles.under}>{denominator}</RawText>
     </View>
   );
@@ -108,6 +129,7 @@ function Stacked({ numerator, denominator }: FractionProps) {
 
 const styles = StyleSheet.create({
   figure: webStyle({ whiteSpace: 'nowrap', fontStyle: 'normal' }),
+  copied: { fontSize: 0, lineHeight: 0, letterSpacing: 0 },
   sign: webStyle({ marginRight: '0.05em' }),
   point: webStyle({ marginLeft: '-0.17em', marginRight: '-0.17em' }),
   unit: webStyle({
@@ -116,6 +138,7 @@ const styles = StyleSheet.create({
     fontSize: '0.82em',
     marginLeft: '0.22em',
   }),
+  feet: webStyle({ marginRight: '0.35em' }),
   degree: webStyle({ fontFamily: font.text, fontWeight: 400, marginLeft: '0.04em' }),
   slanted: webStyle({ whiteSpace: 'nowrap', marginLeft: '0.06em' }),
   term: webStyle({ fontSize: '0.64em', letterSpacing: '-0.03em' }),

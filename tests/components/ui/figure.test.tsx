@@ -1,4 +1,6 @@
 import { render, screen } from '@testing-library/react';
+import { displayLength } from '../../../shared/measure/display';
+import { Rational } from '../../../shared/measure/rational';
 import { Figure, parseFigure, speakFigure } from '../../../components/ui/figure';
 
 describe('taking a plain figure apart', () => {
@@ -49,6 +51,15 @@ test('the drawing is hidden from the screen reader, the words are not', () => {
   const words = screen.getByText('two and three quarters inches');
   expect(words.closest('[aria-hidden="true"]')).toBeNull();
   expect(screen.getByText('in').closest('[aria-hidden="true"]')).not.toBeNull();
+});
+
+test('what the measure engine hands out is drawn and said as it is', () => {
+  // 6 ft 2 3/4 in is 74.75 in of 25.4 mm exactly (ISO 31; the international inch).
+  const mm = Rational.fromNumber(74.75 * 25.4);
+  const wide = displayLength(mm, { system: 'in', instrument: 'tape', grid: 64, feet: true });
+  const { container } = render(<Figure figure={wide} />);
+  expect(screen.getByText(wide.spoken)).toBeTruthy();
+  expect(container.querySelector('[aria-hidden="true"]')?.textContent).toBe('6 ft 2 3/4 in');
 });
 
 test('a minus is a minus sign, and the unit can stand in the column’s head', () => {
