@@ -1,21 +1,9 @@
+import { type Base } from './kinds';
 import { Rational } from './rational';
-
-/** Exponents of the base kinds. A length is 1 in the first place, an area 2. */
-export type Powers = readonly number[];
-export const baseKinds = [
-  'length',
-  'angle',
-  'duration',
-  'mass',
-  'force',
-  'temperature',
-  'count',
-  'money',
-] as const;
 
 /** What a unit is of, and how many base units it makes: mm, degree, minute, kilogram, newton, °C. */
 export interface UnitFact {
-  of: (typeof baseKinds)[number];
+  of: Base | 'count';
   power: number;
   factor: Rational;
 }
