@@ -1,4 +1,3 @@
-import '../components/data/no-eval';
 import { Slot } from 'expo-router';
 import { DataProvider } from '../components/data/data-provider';
 import { Announcer } from '../components/ui/announcer';

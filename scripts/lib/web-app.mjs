@@ -19,6 +19,7 @@ import { Plain } from './steps.mjs';
 const sources = ['app', 'components', 'shared', 'assets', 'public'];
 const configs = [
   'package-lock.json',
+  'index.js',
   'app.json',
   'babel.config.js',
   'metro.config.js',

@@ -26,6 +26,7 @@ const quality = { params: { [constants.BROTLI_PARAM_QUALITY]: 5 } };
 const missing = '+not-found.html';
 const ofTheServer = /^\/(api|media|local)(\/|$)/;
 const developmentOnly = /^\/gallery(\/|\.html|$)/;
+const developmentMark = '<meta name="scantling-mode" content="development"/>';
 const fileLike = /^\/(_expo|assets|fonts|icons)\//;
 
 async function sendHtml(request: Request, response: Response, html: string): Promise<void> {
@@ -126,8 +127,17 @@ async function answerPage(
     sendMissing(web, path, request, response);
     return;
   }
-  const head = await headOf(path);
   const html = web.html.get(page.file);
+  if (html !== undefined && developmentOnly.test(path)) {
+    // Only in development does a request come this far; the page shows itself when it finds this.
+    await sendHtml(
+      request,
+      response,
+      html.replace('</head>', () => `${developmentMark}</head>`),
+    );
+    return;
+  }
+  const head = await headOf(path);
   if (head === null || html === undefined) sendExportFile(web, page.file, request, response);
   else await sendHtml(request, response, injectHead(html, head));
 }

@@ -103,7 +103,8 @@ describe('pages', () => {
   });
 
   it('shows the gallery in development only', async () => {
-    await request(appFor(true)).get('/gallery').expect(200);
+    const { text } = await request(appFor(true)).get('/gallery').expect(200);
+    expect(text).toContain('name="scantling-mode" content="development"');
   });
 
   it('passes on what is not read', async () => {
