@@ -72,7 +72,11 @@ async function loadDemo(env: Record<string, string>, dir: string | undefined): P
   if (mark !== null && existsSync(mark)) return 'there';
   if (!existsSync(demoCommand)) return 'none yet';
   const args = ['--import', 'tsx', join(root, 'server/cli/index.ts'), 'demo'];
-  await promisify(execFile)('node', args, { cwd: root, env: { ...process.env, ...env } });
+  const run = promisify(execFile)('node', args, { cwd: root, env: { ...process.env, ...env } });
+  await run.catch((error: unknown) => {
+    const { stderr } = error as { stderr?: string };
+    throw new Error(`The demo data did not load: ${stderr?.trim() || String(error)}`);
+  });
   if (mark !== null) writeFileSync(mark, new Date().toISOString());
   return 'loaded';
 }
