@@ -40,7 +40,7 @@ export async function startJobs(env: Env, log: Logger): Promise<Jobs> {
       const db = manager
         ? {
             executeSql: async (text: string, values: unknown[]) => ({
-              rows: (await manager.query(text, values)) as unknown[],
+              rows: await manager.query<unknown[]>(text, values),
             }),
           }
         : undefined;

@@ -91,7 +91,7 @@ function authenticate(req: Request): Promise<PersonEntity> {
 async function begin(deps: Deps, req: Request, person: PersonEntity): Promise<void> {
   await new Promise<void>((resolve, reject) => {
     // passport regenerates the session itself, so that an id from before cannot be reused.
-    req.logIn(person, (error: unknown) => (error ? reject(error) : resolve()));
+    req.logIn(person, (error: Error | undefined) => (error ? reject(error) : resolve()));
   });
   req.session.device = deviceOf(req.get('user-agent') ?? '');
   req.session.createdAt = deps.now().toISOString();
@@ -112,7 +112,7 @@ function sessionRoutes(router: Router, deps: Deps): void {
   });
   route(router, deps, api.signOut, async ({ req }) => {
     await new Promise<void>((resolve, reject) =>
-      req.session.destroy((error: unknown) => (error ? reject(error) : resolve())),
+      req.session.destroy((error?: Error) => (error ? reject(error) : resolve())),
     );
   });
   route(router, deps, api.listSessions, async ({ req, person }) => {
