@@ -118,3 +118,13 @@ export function upload<C extends AnyContract>(
     request.send(form);
   });
 }
+
+/** The text of a file such as captions; null when it does not come. */
+export async function loadText(address: string): Promise<string | null> {
+  try {
+    const response = await fetch(address, { credentials: 'same-origin' });
+    return response.ok ? await response.text() : null;
+  } catch {
+    return null;
+  }
+}

@@ -1,0 +1,1 @@
+export { CopyScreen as default } from '../../../components/bench/copy-screen';

@@ -1,0 +1,1 @@
+export { ShopCardScreen as default } from '../../components/shop-card/shop-card-screen';

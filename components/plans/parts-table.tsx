@@ -1,0 +1,69 @@
+import { type Part, type PlanDocument } from '../../shared/plan/document';
+import { Figure, type FigureParts } from '../ui/figure';
+import { Row } from '../ui/layout';
+import { Table, type Column } from '../ui/table';
+import { PartMark } from '../ui/tag';
+import { Text } from '../ui/text';
+import { type PlanValues } from './plan-model';
+
+/** Length, width and thickness of a part, as worked out. */
+function sizesOf(part: Part, values: PlanValues): (FigureParts | null)[] {
+  const state = values.model.parts.get(part.id);
+  return [state?.length, state?.width, state?.thickness].map((size) =>
+    values.length(size?.value?.x),
+  );
+}
+
+function Size({ figures }: { figures: (FigureParts | null)[] }) {
+  const known = figures.filter((f): f is FigureParts => f !== null);
+  return (
+    <Text size="note">
+      {known.map((figure, i) => (
+        <Text key={i}>
+          {i > 0 ? ' × ' : ''}
+          <Figure figure={figure} withoutUnit />
+        </Text>
+      ))}
+    </Text>
+  );
+}
+
+/** The cut list: mark, name, size, how many, of what. */
+export function PartsTable({ document, values }: { document: PlanDocument; values: PlanValues }) {
+  const columns: Column<Part>[] = [
+    {
+      key: 'part',
+      title: 'Part',
+      cell: (part) => (
+        <Row gap={8} align="center">
+          <PartMark letter={part.mark} />
+          <Text size="note">
+            {part.name}
+            {part.role === 'part' ? '' : ` (${part.role.replace('-', ' ')})`}
+          </Text>
+        </Row>
+      ),
+    },
+    {
+      key: 'size',
+      title: 'Size',
+      unit: values.preference.system,
+      align: 'right',
+      cell: (part) => <Size figures={sizesOf(part, values)} />,
+    },
+    {
+      key: 'of',
+      title: 'Of',
+      cell: (part) => document.stock.find((s) => s.id === part.stockId)?.name ?? '',
+    },
+    {
+      key: 'count',
+      title: 'No.',
+      align: 'right',
+      cell: (part) => <Figure figure={{ whole: part.quantity }} size="note" />,
+    },
+  ];
+  return (
+    <Table label="Cut list" columns={columns} rows={document.parts} rowKey={(part) => part.id} />
+  );
+}
