@@ -29,7 +29,14 @@ export function ConfirmScreen() {
   return (
     <FormFrame title="Confirm your e-mail" trouble={trouble}>
       <Text>Press the button to confirm that this e-mail is yours.</Text>
-      <Button kind="primary" label="Confirm my e-mail" onPress={press} busy={confirm.isPending} busyLabel="Confirming" wide />
+      <Button
+        kind="primary"
+        label="Confirm my e-mail"
+        onPress={press}
+        busy={confirm.isPending}
+        busyLabel="Confirming"
+        wide
+      />
     </FormFrame>
   );
 }

@@ -42,7 +42,12 @@ export function CreatorSection({ me }: { me: Me }) {
       {publishingRules.map((rule) => (
         <Text key={rule}>{rule}</Text>
       ))}
-      <Checkbox label="I accept these publishing rules" value={accepted} onChange={setAccepted} error={fault} />
+      <Checkbox
+        label="I accept these publishing rules"
+        value={accepted}
+        onChange={setAccepted}
+        error={fault}
+      />
       <Button label="Become a creator" onPress={press} busy={become.isPending} />
     </Stack>
   );

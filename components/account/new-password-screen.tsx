@@ -19,7 +19,11 @@ export function NewPasswordScreen() {
   const [trouble, setTrouble] = useState<FormTrouble | null>(null);
   const send = () => {
     setTrouble(null);
-    setFault(password.length < limits.passwordMin ? 'Twelve characters or more. A phrase is fine.' : undefined);
+    setFault(
+      password.length < limits.passwordMin
+        ? 'Twelve characters or more. A phrase is fine.'
+        : undefined,
+    );
     if (password.length < limits.passwordMin) return;
     set.mutate(
       { token: token ?? '', password },
@@ -29,7 +33,10 @@ export function NewPasswordScreen() {
           router.replace('/sign-in');
         },
         onError: (error) => {
-          const issue = error instanceof ApiProblem ? error.issues.find((i) => i.path[0] === 'password') : undefined;
+          const issue =
+            error instanceof ApiProblem
+              ? error.issues.find((i) => i.path[0] === 'password')
+              : undefined;
           if (issue) setFault(issue.message);
           else setTrouble(tell(error));
         },
@@ -48,7 +55,14 @@ export function NewPasswordScreen() {
           onChange={setPassword}
           error={fault}
         />
-        <Button kind="primary" label="Set the password" submit busy={set.isPending} busyLabel="Setting it" wide />
+        <Button
+          kind="primary"
+          label="Set the password"
+          submit
+          busy={set.isPending}
+          busyLabel="Setting it"
+          wide
+        />
       </Form>
     </FormFrame>
   );

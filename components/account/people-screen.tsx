@@ -32,9 +32,20 @@ function People() {
     <>
       <PageHead title="People and roles" back="/you" />
       <Page>
-        <TextField label="Find a person" type="search" value={q} onChange={setQ} help="By name or e-mail" />
+        <TextField
+          label="Find a person"
+          type="search"
+          value={q}
+          onChange={setQ}
+          help="By name or e-mail"
+        />
         {people.isError ? (
-          <ErrorState title="The list did not come" happened={tell(people.error).text} code={tell(people.error).code} onRetry={() => void people.refetch()} />
+          <ErrorState
+            title="The list did not come"
+            happened={tell(people.error).text}
+            code={tell(people.error).code}
+            onRetry={() => void people.refetch()}
+          />
         ) : !people.data ? (
           <LoadingLines label="Loading people" />
         ) : people.data.items.length === 0 ? (

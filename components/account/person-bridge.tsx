@@ -13,7 +13,10 @@ export function PersonBridge({ children }: { children: ReactNode }) {
       displayName: me.displayName,
       shopName: me.shopName,
       roles: me.roles,
-      counts: { ...(waiting ? { bench: waiting } : {}), ...(me.openCases ? { cases: me.openCases } : {}) },
+      counts: {
+        ...(waiting ? { bench: waiting } : {}),
+        ...(me.openCases ? { cases: me.openCases } : {}),
+      },
     };
   }, [me, known, failed, waiting]);
   return <ShellPersonProvider value={person}>{children}</ShellPersonProvider>;

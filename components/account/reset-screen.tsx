@@ -18,7 +18,8 @@ export function ResetScreen() {
     setTrouble(null);
     ask.mutate(email.trim(), {
       onError: (error) => {
-        const issue = error instanceof ApiProblem ? error.issues.find((i) => i.path[0] === 'email') : undefined;
+        const issue =
+          error instanceof ApiProblem ? error.issues.find((i) => i.path[0] === 'email') : undefined;
         if (issue) setFault(issue.message);
         else setTrouble(tell(error));
       },
@@ -33,8 +34,22 @@ export function ResetScreen() {
       ) : (
         <Form label="Set a new password" onSubmit={send}>
           <Text>We send a letter with a link that lets you set a new one.</Text>
-          <TextField label="E-mail" type="email" autoComplete="email" value={email} onChange={setEmail} error={fault} />
-          <Button kind="primary" label="Send the letter" submit busy={ask.isPending} busyLabel="Sending" wide />
+          <TextField
+            label="E-mail"
+            type="email"
+            autoComplete="email"
+            value={email}
+            onChange={setEmail}
+            error={fault}
+          />
+          <Button
+            kind="primary"
+            label="Send the letter"
+            submit
+            busy={ask.isPending}
+            busyLabel="Sending"
+            wide
+          />
         </Form>
       )}
     </FormFrame>

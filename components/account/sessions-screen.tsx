@@ -8,7 +8,8 @@ import { ErrorState, LoadingLines } from '../ui/states';
 import { Text } from '../ui/text';
 import { SignedIn } from './signed-in';
 
-const when = (at: string) => new Date(at).toLocaleString(undefined, { dateStyle: 'medium', timeStyle: 'short' });
+const when = (at: string) =>
+  new Date(at).toLocaleString(undefined, { dateStyle: 'medium', timeStyle: 'short' });
 
 export function SessionsScreen() {
   return (
@@ -26,7 +27,12 @@ function Sessions() {
       <PageHead title="Where you are signed in" back="/you" />
       <Page width="form">
         {sessions.isError ? (
-          <ErrorState title="The list did not come" happened={tell(sessions.error).text} code={tell(sessions.error).code} onRetry={() => void sessions.refetch()} />
+          <ErrorState
+            title="The list did not come"
+            happened={tell(sessions.error).text}
+            code={tell(sessions.error).code}
+            onRetry={() => void sessions.refetch()}
+          />
         ) : !sessions.data ? (
           <LoadingLines label="Loading your sessions" />
         ) : (
@@ -43,7 +49,11 @@ function Sessions() {
                   {session.current ? null : (
                     <Button
                       label={`End the session on ${session.device}`}
-                      onPress={() => end.mutate(session.id, { onError: (error) => toast({ text: tell(error).text }) })}
+                      onPress={() =>
+                        end.mutate(session.id, {
+                          onError: (error) => toast({ text: tell(error).text }),
+                        })
+                      }
                     >
                       End it
                     </Button>

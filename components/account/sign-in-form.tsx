@@ -41,14 +41,25 @@ export function SignInForm({ submit, onTrouble }: SignInFormProps) {
         control={form.control}
         name="email"
         render={({ field, fieldState }) => (
-          <TextField {...field} label="E-mail" type="email" autoComplete="email" error={fieldState.error?.message} />
+          <TextField
+            {...field}
+            label="E-mail"
+            type="email"
+            autoComplete="email"
+            error={fieldState.error?.message}
+          />
         )}
       />
       <Controller
         control={form.control}
         name="password"
         render={({ field, fieldState }) => (
-          <PasswordField {...field} label="Password" autoComplete="current-password" error={fieldState.error?.message} />
+          <PasswordField
+            {...field}
+            label="Password"
+            autoComplete="current-password"
+            error={fieldState.error?.message}
+          />
         )}
       />
       <Button kind="primary" label="Sign in" submit busy={busy} busyLabel="Signing in" wide />

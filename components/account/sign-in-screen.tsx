@@ -33,7 +33,8 @@ export function SignInScreen() {
       <Stack gap={12}>
         <Heading level={2}>Without an account</Heading>
         <Text tone="ink2">
-          Read every plan and see every figure. A bench copy that keeps your readings needs an account.
+          Read every plan and see every figure. A bench copy that keeps your readings needs an
+          account.
         </Text>
       </Stack>
     </FormFrame>

@@ -70,13 +70,21 @@ export function SignUpForm({ submit, onTrouble }: SignUpFormProps) {
             error={fieldState.error?.message}
           >
             <Text size="note">
-              I have read the <Link href="/terms">terms</Link> and the <Link href="/safety">safety notice</Link>. A
-              check that holds is not a promise of safety.
+              I have read the <Link href="/terms">terms</Link> and the{' '}
+              <Link href="/safety">safety notice</Link>. A check that holds is not a promise of
+              safety.
             </Text>
           </Checkbox>
         )}
       />
-      <Button kind="primary" label="Make the account" submit busy={busy} busyLabel="Making it" wide />
+      <Button
+        kind="primary"
+        label="Make the account"
+        submit
+        busy={busy}
+        busyLabel="Making it"
+        wide
+      />
     </Form>
   );
 }
@@ -88,7 +96,12 @@ function WhoFields({ control }: { control: Control<Typed, unknown, SignUpValues>
         control={control}
         name="displayName"
         render={({ field, fieldState }) => (
-          <TextField {...field} label="Name others see" autoComplete="nickname" error={fieldState.error?.message} />
+          <TextField
+            {...field}
+            label="Name others see"
+            autoComplete="nickname"
+            error={fieldState.error?.message}
+          />
         )}
       />
       <Controller

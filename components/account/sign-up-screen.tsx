@@ -17,7 +17,8 @@ export function SignUpScreen() {
           We wrote to {sentTo}. Open the letter and follow its link; then sign in.
         </Banner>
         <Text tone="ink2">
-          Nothing came? Look in the spam folder, or <Link href="/sign-in">sign in</Link> and have it sent again.
+          Nothing came? Look in the spam folder, or <Link href="/sign-in">sign in</Link> and have it
+          sent again.
         </Text>
       </FormFrame>
     );

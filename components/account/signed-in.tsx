@@ -34,7 +34,11 @@ export function SignedIn({ title, what, children }: SignedInProps) {
             title="Sign in first"
             actions={
               <Row gap={12} wrap>
-                <Button kind="primary" label="Sign in" onPress={() => router.push(`/sign-in?next=${encodeURIComponent(path)}` as Href)} />
+                <Button
+                  kind="primary"
+                  label="Sign in"
+                  onPress={() => router.push(`/sign-in?next=${encodeURIComponent(path)}` as Href)}
+                />
                 <Button label="Make an account" onPress={() => router.push('/sign-up')} />
               </Row>
             }

@@ -31,7 +31,13 @@ export function YouScreen() {
     <>
       <PageHead title="You" sub={me ? me.email : undefined} />
       <Page width="form">
-        {me ? <Account me={me} /> : known || failed ? <Nobody /> : <LoadingLines label="Loading your page" />}
+        {me ? (
+          <Account me={me} />
+        ) : known || failed ? (
+          <Nobody />
+        ) : (
+          <LoadingLines label="Loading your page" />
+        )}
         <Settings signedIn={me !== null} />
         <Section>
           <Heading level={2}>The small print</Heading>
@@ -91,12 +97,17 @@ function Account({ me }: { me: Me }) {
 
 function ProfileForm({ me }: { me: Me }) {
   const update = useUpdateProfile();
-  const form = useForm({ defaultValues: { displayName: me.displayName, shopName: me.shopName ?? '' } });
+  const form = useForm({
+    defaultValues: { displayName: me.displayName, shopName: me.shopName ?? '' },
+  });
   const [trouble, setTrouble] = useState<string | null>(null);
   const send = form.handleSubmit(async (values) => {
     setTrouble(null);
     try {
-      await update.mutateAsync({ displayName: values.displayName, shopName: values.shopName.trim() || null });
+      await update.mutateAsync({
+        displayName: values.displayName,
+        shopName: values.shopName.trim() || null,
+      });
       toast({ text: 'Kept.' });
     } catch (error) {
       setTrouble(showProblem(error, ['displayName', 'shopName'], form.setError)?.text ?? null);
@@ -108,12 +119,21 @@ function ProfileForm({ me }: { me: Me }) {
       <Controller
         control={form.control}
         name="displayName"
-        render={({ field, fieldState }) => <TextField {...field} label="Name others see" error={fieldState.error?.message} />}
+        render={({ field, fieldState }) => (
+          <TextField {...field} label="Name others see" error={fieldState.error?.message} />
+        )}
       />
       <Controller
         control={form.control}
         name="shopName"
-        render={({ field, fieldState }) => <TextField {...field} label="Name of your shop" optional error={fieldState.error?.message} />}
+        render={({ field, fieldState }) => (
+          <TextField
+            {...field}
+            label="Name of your shop"
+            optional
+            error={fieldState.error?.message}
+          />
+        )}
       />
       <Button label="Keep" submit busy={update.isPending} />
     </Form>
@@ -173,7 +193,11 @@ function Leave({ me }: { me: Me }) {
     });
   return (
     <Section>
-      <Button label="Sign out" onPress={() => (unsent ? setAsking(true) : leave())} busy={signOut.isPending} />
+      <Button
+        label="Sign out"
+        onPress={() => (unsent ? setAsking(true) : leave())}
+        busy={signOut.isPending}
+      />
       <Dialog
         open={asking}
         title="Some of your bench entries are not sent"
@@ -182,8 +206,8 @@ function Leave({ me }: { me: Me }) {
         action={{ label: `Discard ${unsent} and sign out`, onPress: leave, danger: true }}
       >
         <Text>
-          {unsent} {unsent === 1 ? 'entry waits' : 'entries wait'} on this device. Stay until the signal is back and they go by
-          themselves.
+          {unsent} {unsent === 1 ? 'entry waits' : 'entries wait'} on this device. Stay until the
+          signal is back and they go by themselves.
         </Text>
       </Dialog>
     </Section>

@@ -31,9 +31,7 @@ type Faults = Partial<Record<'text' | 'why', string>>;
 export function faultsOf(body: unknown): Faults {
   const parsed = commentBody.safeParse(body);
   if (parsed.success) return {};
-  return Object.fromEntries(
-    parsed.error.issues.map((i) => [String(i.path[0]), i.message]),
-  );
+  return Object.fromEntries(parsed.error.issues.map((i) => [String(i.path[0]), i.message]));
 }
 
 /** A critique says keep or change, and why; a question asks. */
