@@ -1,5 +1,5 @@
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
-import { cpus } from 'node:os';
+import { cpus, loadavg } from 'node:os';
 import { join } from 'node:path';
 
 const page = join(__dirname, '../../docs/performance.md');
@@ -38,7 +38,8 @@ export function table(head: string[], rows: (string | number)[][]): string {
 export function conditions(): string {
   const processor = cpus()[0]?.model.trim() ?? 'unknown processor';
   const day = new Date().toISOString().slice(0, 10);
-  return `Measured ${day}, Node ${process.versions.node}, ${cpus().length} cores (${processor}), loopback.`;
+  const load = (loadavg()[1] ?? 0).toFixed(1);
+  return `Measured ${day}, Node ${process.versions.node}, ${cpus().length} cores (${processor}), loopback; load of the last five minutes ${load}.`;
 }
 
 /** Prints the section; with `--write` on the command line also writes it. */
