@@ -38,7 +38,7 @@ export function PlanContent({ page }: { page: PlanPage }) {
   };
   return (
     <Panes asideLabel="Plan at a glance" aside={<PlanAside page={page} values={values} />}>
-      <PageHead title={document.title} back="/" barTitle="Plans" description={document.summary} />
+      <PageHead title={document.title} back="/" description={document.summary} />
       <Page>
         <State page={page} />
         <Row gap={24} align="flex-start" wrap>

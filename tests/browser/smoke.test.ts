@@ -42,6 +42,24 @@ describe.each(looks)('signed out, $width px, by $theme', (look) => {
   }
 });
 
+describe.each(looks)('a published plan, $width px, by $theme', (look) => {
+  story('reads signed out, with its own title in the document as served', async (stage) => {
+    const list = (await (await fetch(`${stage.base}/api/plans`)).json()) as {
+      items: { slug: string; title: string }[];
+    };
+    const plan = list.items[0];
+    if (plan === undefined) throw new Error('The demo data holds no published plan.');
+    const served = await (await fetch(`${stage.base}/plans/${plan.slug}`)).text();
+    expect(served).toContain(`property="og:title" content="${plan.title}`);
+    const { page } = await stage.newPage(look);
+    await page.goto(`/plans/${plan.slug}`);
+    await page.getByRole('heading', { level: 1, name: plan.title }).waitFor();
+    await page.waitForLoadState('networkidle');
+    expect(await axe(page)).toEqual([]);
+    expect(await sidewaysScroll(page)).toBe(0);
+  });
+});
+
 story('an unknown address says so', async (stage) => {
   const watched = await stage.newPage();
   const { page } = watched;
