@@ -282,14 +282,19 @@ function peg$parse(input, options) {
   const peg$e50 = peg$literalExpectation("lbf", false);
   const peg$e51 = peg$literalExpectation("lb", false);
   const peg$e52 = peg$classExpectation(["N", "d", ["g", "h"], "s"], false, false, false);
-  const peg$e53 = peg$classExpectation(["/", "\u2044", "\u2215"], false, false, false);
-  const peg$e54 = peg$classExpectation(["\xBD", "\u2153", "\u2154", "\xBC", "\xBE", "\u2155", "\u2156", "\u2157", "\u2158", "\u2159", "\u215A", "\u215B", "\u215C", "\u215D", "\u215E"], false, false, false);
-  const peg$e55 = peg$classExpectation([["0", "9"]], false, false, false);
-  const peg$e56 = peg$literalExpectation(".", false);
-  const peg$e57 = peg$classExpectation([["A", "Z"], ["a", "z"]], false, false, false);
-  const peg$e58 = peg$classExpectation([["A", "Z"], ["a", "z"], ["0", "9"], "_"], false, false, false);
-  const peg$e59 = peg$classExpectation([" ", "\t", "\xA0", "\u2009", "\u202F"], false, false, false);
-  const peg$e60 = peg$classExpectation([" ", "\t", "\r", "\n", "\xA0", "\u2009", "\u202F"], false, false, false);
+  const peg$e53 = peg$otherExpectation("line");
+  const peg$e54 = peg$classExpectation(["/", "\u2044", "\u2215"], false, false, false);
+  const peg$e55 = peg$otherExpectation("fraction");
+  const peg$e56 = peg$classExpectation(["\xBD", "\u2153", "\u2154", "\xBC", "\xBE", "\u2155", "\u2156", "\u2157", "\u2158", "\u2159", "\u215A", "\u215B", "\u215C", "\u215D", "\u215E"], false, false, false);
+  const peg$e57 = peg$classExpectation([["0", "9"]], false, false, false);
+  const peg$e58 = peg$literalExpectation(".", false);
+  const peg$e59 = peg$otherExpectation("figure");
+  const peg$e60 = peg$classExpectation([["A", "Z"], ["a", "z"]], false, false, false);
+  const peg$e61 = peg$otherExpectation("letter");
+  const peg$e62 = peg$classExpectation([["A", "Z"], ["a", "z"], ["0", "9"], "_"], false, false, false);
+  const peg$e63 = peg$otherExpectation("space");
+  const peg$e64 = peg$classExpectation([" ", "\t", "\xA0", "\u2009", "\u202F"], false, false, false);
+  const peg$e65 = peg$classExpectation([" ", "\t", "\r", "\n", "\xA0", "\u2009", "\u202F"], false, false, false);
 
   function peg$f0(e) {    return e;  }
   function peg$f1(name, args) {    return { t: 'check', op: name, args, at: offset() };  }
@@ -320,15 +325,20 @@ function peg$parse(input, options) {
   function peg$f17(s) {    return s;  }
   function peg$f18(s, a) {    return s === '-' ? { t: 'neg', a, at: offset() } : a;  }
   function peg$f19(e) {    return e;  }
-  function peg$f20(name) {    return { t: 'sym', name, at: offset() };  }
-  function peg$f21(name, args) {    return { t: 'call', name, args, at: offset() };  }
+  function peg$f20(name, args) {    return args;  }
+  function peg$f21(name, args) {
+    return args ? { t: 'call', name, args, at: offset() } : { t: 'sym', name, at: offset() };
+  }
   function peg$f22(first, e) {    return e;  }
   function peg$f23(first, rest) {    return [first, ...rest];  }
-  function peg$f24(text) {    return options.length(text, offset());  }
-  function peg$f25(text) {    return options.length(text, offset());  }
-  function peg$f26(figure, unit) {    return options.measured(figure, unit, offset());  }
-  function peg$f27(unit) {    return unit;  }
-  function peg$f28(text) {    return options.plain(text, offset());  }
+  function peg$f24(figure, tail) {
+    return tail.unit ? options.measured(figure, tail.unit, offset()) : options.length(figure + tail.length, offset());
+  }
+  function peg$f25(length) {    return { length };  }
+  function peg$f26(length) {    return { length };  }
+  function peg$f27(unit) {    return { unit };  }
+  function peg$f28(unit) {    return unit;  }
+  function peg$f29(text) {    return options.plain(text, offset());  }
   let peg$currPos = options.peg$currPos | 0;
   let peg$savedPos = peg$currPos;
   const peg$posDetailsCache = [{ line: 1, column: 1 }];
@@ -1055,7 +1065,7 @@ function peg$parse(input, options) {
   }
 
   function peg$parseAtom() {
-    let s0, s1, s2, s3;
+    let s0, s1, s2, s3, s4, s5;
 
     s0 = peg$currPos;
     if (input.charCodeAt(peg$currPos) === 40) {
@@ -1091,65 +1101,51 @@ function peg$parse(input, options) {
       s0 = peg$FAILED;
     }
     if (s0 === peg$FAILED) {
-      s0 = peg$parseLength();
-      if (s0 === peg$FAILED) {
-        s0 = peg$parseMeasured();
-        if (s0 === peg$FAILED) {
-          s0 = peg$parsePlain();
-          if (s0 === peg$FAILED) {
-            s0 = peg$parseCall();
-            if (s0 === peg$FAILED) {
-              s0 = peg$currPos;
-              s1 = peg$parseName();
-              if (s1 !== peg$FAILED) {
-                peg$savedPos = s0;
-                s1 = peg$f20(s1);
-              }
-              s0 = s1;
-            }
-          }
-        }
-      }
-    }
-
-    return s0;
-  }
-
-  function peg$parseCall() {
-    let s0, s1, s2, s3, s4;
-
-    s0 = peg$currPos;
-    s1 = peg$parseName();
-    if (s1 !== peg$FAILED) {
-      s2 = peg$parseOpen();
-      if (s2 !== peg$FAILED) {
-        s3 = peg$parseArguments();
+      s0 = peg$currPos;
+      s1 = peg$parseName();
+      if (s1 !== peg$FAILED) {
+        s2 = peg$currPos;
+        s3 = peg$parseOpen();
         if (s3 !== peg$FAILED) {
-          if (input.charCodeAt(peg$currPos) === 41) {
-            s4 = peg$c2;
-            peg$currPos++;
-          } else {
-            s4 = peg$FAILED;
-            if (peg$silentFails === 0) { peg$fail(peg$e2); }
-          }
+          s4 = peg$parseArguments();
           if (s4 !== peg$FAILED) {
-            peg$savedPos = s0;
-            s0 = peg$f21(s1, s3);
+            if (input.charCodeAt(peg$currPos) === 41) {
+              s5 = peg$c2;
+              peg$currPos++;
+            } else {
+              s5 = peg$FAILED;
+              if (peg$silentFails === 0) { peg$fail(peg$e2); }
+            }
+            if (s5 !== peg$FAILED) {
+              peg$savedPos = s2;
+              s2 = peg$f20(s1, s4);
+            } else {
+              peg$currPos = s2;
+              s2 = peg$FAILED;
+            }
           } else {
-            peg$currPos = s0;
-            s0 = peg$FAILED;
+            peg$currPos = s2;
+            s2 = peg$FAILED;
           }
         } else {
-          peg$currPos = s0;
-          s0 = peg$FAILED;
+          peg$currPos = s2;
+          s2 = peg$FAILED;
         }
+        if (s2 === peg$FAILED) {
+          s2 = null;
+        }
+        peg$savedPos = s0;
+        s0 = peg$f21(s1, s2);
       } else {
         peg$currPos = s0;
         s0 = peg$FAILED;
       }
-    } else {
-      peg$currPos = s0;
-      s0 = peg$FAILED;
+      if (s0 === peg$FAILED) {
+        s0 = peg$parseLiteral();
+        if (s0 === peg$FAILED) {
+          s0 = peg$parsePlain();
+        }
+      }
     }
 
     return s0;
@@ -1240,39 +1236,61 @@ function peg$parse(input, options) {
     return s0;
   }
 
-  function peg$parseLength() {
-    let s0, s1, s2, s3, s4, s5, s6, s7, s8, s9;
+  function peg$parseLiteral() {
+    let s0, s1, s2;
+
+    s0 = peg$currPos;
+    s1 = peg$currPos;
+    s2 = peg$parseFigure();
+    if (s2 !== peg$FAILED) {
+      s1 = input.substring(s1, peg$currPos);
+    } else {
+      s1 = s2;
+    }
+    if (s1 !== peg$FAILED) {
+      s2 = peg$parseTail();
+      if (s2 !== peg$FAILED) {
+        peg$savedPos = s0;
+        s0 = peg$f24(s1, s2);
+      } else {
+        peg$currPos = s0;
+        s0 = peg$FAILED;
+      }
+    } else {
+      peg$currPos = s0;
+      s0 = peg$FAILED;
+    }
+
+    return s0;
+  }
+
+  function peg$parseTail() {
+    let s0, s1, s2, s3, s4, s5, s6, s7, s8;
 
     s0 = peg$currPos;
     s1 = peg$currPos;
     s2 = peg$currPos;
-    s3 = peg$parseFigure();
-    if (s3 !== peg$FAILED) {
-      s4 = peg$parse_();
-      s5 = peg$parseFoot();
+    s3 = peg$parse_();
+    s4 = peg$parseFoot();
+    if (s4 !== peg$FAILED) {
+      if (input.charCodeAt(peg$currPos) === 45) {
+        s5 = peg$c8;
+        peg$currPos++;
+      } else {
+        s5 = peg$FAILED;
+        if (peg$silentFails === 0) { peg$fail(peg$e9); }
+      }
+      if (s5 === peg$FAILED) {
+        s5 = peg$parse_();
+      }
       if (s5 !== peg$FAILED) {
-        if (input.charCodeAt(peg$currPos) === 45) {
-          s6 = peg$c8;
-          peg$currPos++;
-        } else {
-          s6 = peg$FAILED;
-          if (peg$silentFails === 0) { peg$fail(peg$e9); }
-        }
-        if (s6 === peg$FAILED) {
-          s6 = peg$parse_();
-        }
+        s6 = peg$parseFigure();
         if (s6 !== peg$FAILED) {
-          s7 = peg$parseFigure();
-          if (s7 !== peg$FAILED) {
-            s8 = peg$parse_();
-            s9 = peg$parseInch();
-            if (s9 !== peg$FAILED) {
-              s3 = [s3, s4, s5, s6, s7, s8, s9];
-              s2 = s3;
-            } else {
-              peg$currPos = s2;
-              s2 = peg$FAILED;
-            }
+          s7 = peg$parse_();
+          s8 = peg$parseInch();
+          if (s8 !== peg$FAILED) {
+            s3 = [s3, s4, s5, s6, s7, s8];
+            s2 = s3;
           } else {
             peg$currPos = s2;
             s2 = peg$FAILED;
@@ -1296,24 +1314,18 @@ function peg$parse(input, options) {
     }
     if (s1 !== peg$FAILED) {
       peg$savedPos = s0;
-      s1 = peg$f24(s1);
+      s1 = peg$f25(s1);
     }
     s0 = s1;
     if (s0 === peg$FAILED) {
       s0 = peg$currPos;
       s1 = peg$currPos;
       s2 = peg$currPos;
-      s3 = peg$parseFigure();
-      if (s3 !== peg$FAILED) {
-        s4 = peg$parse_();
-        s5 = peg$parseLengthUnit();
-        if (s5 !== peg$FAILED) {
-          s3 = [s3, s4, s5];
-          s2 = s3;
-        } else {
-          peg$currPos = s2;
-          s2 = peg$FAILED;
-        }
+      s3 = peg$parse_();
+      s4 = peg$parseLengthUnit();
+      if (s4 !== peg$FAILED) {
+        s3 = [s3, s4];
+        s2 = s3;
       } else {
         peg$currPos = s2;
         s2 = peg$FAILED;
@@ -1325,9 +1337,21 @@ function peg$parse(input, options) {
       }
       if (s1 !== peg$FAILED) {
         peg$savedPos = s0;
-        s1 = peg$f25(s1);
+        s1 = peg$f26(s1);
       }
       s0 = s1;
+      if (s0 === peg$FAILED) {
+        s0 = peg$currPos;
+        s1 = peg$parse_();
+        s2 = peg$parseUnit();
+        if (s2 !== peg$FAILED) {
+          peg$savedPos = s0;
+          s0 = peg$f27(s2);
+        } else {
+          peg$currPos = s0;
+          s0 = peg$FAILED;
+        }
+      }
     }
 
     return s0;
@@ -1578,35 +1602,6 @@ function peg$parse(input, options) {
     return s0;
   }
 
-  function peg$parseMeasured() {
-    let s0, s1, s2, s3;
-
-    s0 = peg$currPos;
-    s1 = peg$currPos;
-    s2 = peg$parseFigure();
-    if (s2 !== peg$FAILED) {
-      s1 = input.substring(s1, peg$currPos);
-    } else {
-      s1 = s2;
-    }
-    if (s1 !== peg$FAILED) {
-      s2 = peg$parse_();
-      s3 = peg$parseUnit();
-      if (s3 !== peg$FAILED) {
-        peg$savedPos = s0;
-        s0 = peg$f26(s1, s3);
-      } else {
-        peg$currPos = s0;
-        s0 = peg$FAILED;
-      }
-    } else {
-      peg$currPos = s0;
-      s0 = peg$FAILED;
-    }
-
-    return s0;
-  }
-
   function peg$parseUnit() {
     let s0, s1, s2, s3, s4;
 
@@ -1809,7 +1804,7 @@ function peg$parse(input, options) {
           }
           if (s3 !== peg$FAILED) {
             peg$savedPos = s0;
-            s0 = peg$f27(s1);
+            s0 = peg$f28(s1);
           } else {
             peg$currPos = s0;
             s0 = peg$FAILED;
@@ -1874,7 +1869,7 @@ function peg$parse(input, options) {
       }
       if (s2 !== peg$FAILED) {
         peg$savedPos = s0;
-        s0 = peg$f28(s1);
+        s0 = peg$f29(s1);
       } else {
         peg$currPos = s0;
         s0 = peg$FAILED;
@@ -1990,13 +1985,19 @@ function peg$parse(input, options) {
   }
 
   function peg$parseLine() {
-    let s0;
+    let s0, s1;
 
+    peg$silentFails++;
     s0 = input.charAt(peg$currPos);
     if (peg$r5.test(s0)) {
       peg$currPos++;
     } else {
       s0 = peg$FAILED;
+      if (peg$silentFails === 0) { peg$fail(peg$e54); }
+    }
+    peg$silentFails--;
+    if (s0 === peg$FAILED) {
+      s1 = peg$FAILED;
       if (peg$silentFails === 0) { peg$fail(peg$e53); }
     }
 
@@ -2004,14 +2005,20 @@ function peg$parse(input, options) {
   }
 
   function peg$parseGlyph() {
-    let s0;
+    let s0, s1;
 
+    peg$silentFails++;
     s0 = input.charAt(peg$currPos);
     if (peg$r6.test(s0)) {
       peg$currPos++;
     } else {
       s0 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e54); }
+      if (peg$silentFails === 0) { peg$fail(peg$e56); }
+    }
+    peg$silentFails--;
+    if (s0 === peg$FAILED) {
+      s1 = peg$FAILED;
+      if (peg$silentFails === 0) { peg$fail(peg$e55); }
     }
 
     return s0;
@@ -2027,7 +2034,7 @@ function peg$parse(input, options) {
       peg$currPos++;
     } else {
       s2 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e55); }
+      if (peg$silentFails === 0) { peg$fail(peg$e57); }
     }
     while (s2 !== peg$FAILED) {
       s1.push(s2);
@@ -2036,7 +2043,7 @@ function peg$parse(input, options) {
         peg$currPos++;
       } else {
         s2 = peg$FAILED;
-        if (peg$silentFails === 0) { peg$fail(peg$e55); }
+        if (peg$silentFails === 0) { peg$fail(peg$e57); }
       }
     }
     if (input.charCodeAt(peg$currPos) === 46) {
@@ -2044,7 +2051,7 @@ function peg$parse(input, options) {
       peg$currPos++;
     } else {
       s2 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e56); }
+      if (peg$silentFails === 0) { peg$fail(peg$e58); }
     }
     if (s2 !== peg$FAILED) {
       s3 = [];
@@ -2053,7 +2060,7 @@ function peg$parse(input, options) {
         peg$currPos++;
       } else {
         s4 = peg$FAILED;
-        if (peg$silentFails === 0) { peg$fail(peg$e55); }
+        if (peg$silentFails === 0) { peg$fail(peg$e57); }
       }
       if (s4 !== peg$FAILED) {
         while (s4 !== peg$FAILED) {
@@ -2063,7 +2070,7 @@ function peg$parse(input, options) {
             peg$currPos++;
           } else {
             s4 = peg$FAILED;
-            if (peg$silentFails === 0) { peg$fail(peg$e55); }
+            if (peg$silentFails === 0) { peg$fail(peg$e57); }
           }
         }
       } else {
@@ -2088,7 +2095,7 @@ function peg$parse(input, options) {
         peg$currPos++;
       } else {
         s2 = peg$FAILED;
-        if (peg$silentFails === 0) { peg$fail(peg$e55); }
+        if (peg$silentFails === 0) { peg$fail(peg$e57); }
       }
       if (s2 !== peg$FAILED) {
         while (s2 !== peg$FAILED) {
@@ -2098,7 +2105,7 @@ function peg$parse(input, options) {
             peg$currPos++;
           } else {
             s2 = peg$FAILED;
-            if (peg$silentFails === 0) { peg$fail(peg$e55); }
+            if (peg$silentFails === 0) { peg$fail(peg$e57); }
           }
         }
       } else {
@@ -2110,7 +2117,7 @@ function peg$parse(input, options) {
           peg$currPos++;
         } else {
           s2 = peg$FAILED;
-          if (peg$silentFails === 0) { peg$fail(peg$e56); }
+          if (peg$silentFails === 0) { peg$fail(peg$e58); }
         }
         if (s2 !== peg$FAILED) {
           s1 = [s1, s2];
@@ -2131,6 +2138,7 @@ function peg$parse(input, options) {
   function peg$parseWhole() {
     let s0, s1, s2;
 
+    peg$silentFails++;
     s0 = peg$currPos;
     s1 = [];
     s2 = input.charAt(peg$currPos);
@@ -2138,7 +2146,7 @@ function peg$parse(input, options) {
       peg$currPos++;
     } else {
       s2 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e55); }
+      if (peg$silentFails === 0) { peg$fail(peg$e57); }
     }
     if (s2 !== peg$FAILED) {
       while (s2 !== peg$FAILED) {
@@ -2148,7 +2156,7 @@ function peg$parse(input, options) {
           peg$currPos++;
         } else {
           s2 = peg$FAILED;
-          if (peg$silentFails === 0) { peg$fail(peg$e55); }
+          if (peg$silentFails === 0) { peg$fail(peg$e57); }
         }
       }
     } else {
@@ -2158,6 +2166,11 @@ function peg$parse(input, options) {
       s0 = input.substring(s0, peg$currPos);
     } else {
       s0 = s1;
+    }
+    peg$silentFails--;
+    if (s0 === peg$FAILED) {
+      s1 = peg$FAILED;
+      if (peg$silentFails === 0) { peg$fail(peg$e59); }
     }
 
     return s0;
@@ -2173,7 +2186,7 @@ function peg$parse(input, options) {
       peg$currPos++;
     } else {
       s2 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e57); }
+      if (peg$silentFails === 0) { peg$fail(peg$e60); }
     }
     if (s2 !== peg$FAILED) {
       s3 = [];
@@ -2198,14 +2211,20 @@ function peg$parse(input, options) {
   }
 
   function peg$parsePart() {
-    let s0;
+    let s0, s1;
 
+    peg$silentFails++;
     s0 = input.charAt(peg$currPos);
     if (peg$r9.test(s0)) {
       peg$currPos++;
     } else {
       s0 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e58); }
+      if (peg$silentFails === 0) { peg$fail(peg$e62); }
+    }
+    peg$silentFails--;
+    if (s0 === peg$FAILED) {
+      s1 = peg$FAILED;
+      if (peg$silentFails === 0) { peg$fail(peg$e61); }
     }
 
     return s0;
@@ -2214,13 +2233,14 @@ function peg$parse(input, options) {
   function peg$parseGap() {
     let s0, s1;
 
+    peg$silentFails++;
     s0 = [];
     s1 = input.charAt(peg$currPos);
     if (peg$r10.test(s1)) {
       peg$currPos++;
     } else {
       s1 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e59); }
+      if (peg$silentFails === 0) { peg$fail(peg$e64); }
     }
     if (s1 !== peg$FAILED) {
       while (s1 !== peg$FAILED) {
@@ -2230,11 +2250,16 @@ function peg$parse(input, options) {
           peg$currPos++;
         } else {
           s1 = peg$FAILED;
-          if (peg$silentFails === 0) { peg$fail(peg$e59); }
+          if (peg$silentFails === 0) { peg$fail(peg$e64); }
         }
       }
     } else {
       s0 = peg$FAILED;
+    }
+    peg$silentFails--;
+    if (s0 === peg$FAILED) {
+      s1 = peg$FAILED;
+      if (peg$silentFails === 0) { peg$fail(peg$e63); }
     }
 
     return s0;
@@ -2243,13 +2268,14 @@ function peg$parse(input, options) {
   function peg$parse_() {
     let s0, s1;
 
+    peg$silentFails++;
     s0 = [];
     s1 = input.charAt(peg$currPos);
     if (peg$r11.test(s1)) {
       peg$currPos++;
     } else {
       s1 = peg$FAILED;
-      if (peg$silentFails === 0) { peg$fail(peg$e60); }
+      if (peg$silentFails === 0) { peg$fail(peg$e65); }
     }
     while (s1 !== peg$FAILED) {
       s0.push(s1);
@@ -2258,9 +2284,10 @@ function peg$parse(input, options) {
         peg$currPos++;
       } else {
         s1 = peg$FAILED;
-        if (peg$silentFails === 0) { peg$fail(peg$e60); }
+        if (peg$silentFails === 0) { peg$fail(peg$e65); }
       }
     }
+    peg$silentFails--;
 
     return s0;
   }

@@ -46,6 +46,8 @@ const worked: [string, string][] = [
   ['panel - 1-1/2 in', '-261/10'],
   ['5\' 3-1/2" - 3 1/2 in', '1524'],
   ['(panel + depth) * 2', '36'],
+  ['12 in-3 in', '1143/5'],
+  ['5\'-3" + 1 mm', '8006/5'],
   ['panel * 3/4', '9'],
   ['slot_width / 3', '127/20'],
   ['min(panel, depth) + max(1 mm, 1/16 in)', '607/80'],
