@@ -176,7 +176,7 @@ export async function keepCaptions(
     const fault = captions.faults[0];
     throw new ApiError(
       'uploads/unreadable',
-      `“${file.name}” holds no captions we can read${fault ? ` (line ${fault.line}: ${fault.message})` : ''}. Nothing was stored; export it as .vtt or .srt and try again.`,
+      `“${file.name}” holds no captions we can read${fault ? ` (line ${fault.line}: ${fault.sentence})` : ''}. Nothing was stored; export it as .vtt or .srt and try again.`,
     );
   }
   const vtt = Buffer.from(toVtt(captions.cues));
