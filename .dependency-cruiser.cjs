@@ -51,7 +51,7 @@ module.exports = {
       severity: 'error',
       from: { path: '^server/features/([^/]+)/' },
       to: {
-        path: '^server/features/([^/]+)/.*(routes|repository|presenter)',
+        path: '^server/features/([^/]+)/.*routes',
         pathNot: '^server/features/$1/',
       },
     },

@@ -40,7 +40,7 @@ export function BenchStep(props: BenchStepProps) {
     <Stack gap={16}>
       {stretch ? (
         <ClipPlayer
-          key={step.id}
+          key={`clip-${step.id}`}
           clip={copy.document.clip}
           stretch={stretch}
           label={`Clip of step: ${step.title}`}
@@ -82,7 +82,7 @@ export function BenchStep(props: BenchStepProps) {
         />
       ))}
       {state.ticks.has(step.id) ? <Undo {...props} /> : null}
-      <Notes key={step.id} {...props} />
+      <Notes key={`notes-${step.id}`} {...props} />
     </Stack>
   );
 }

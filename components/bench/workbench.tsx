@@ -78,12 +78,14 @@ export function Workbench({ copy, personId }: { copy: BenchCopy; personId: strin
       />
       <TopLine at={at} count={document.steps.length} signal={signal} />
       <View style={styles.middle}>
-        <BenchStick
-          input={stick}
-          label="Story stick, your bench copy"
-          selected={step.id}
-          onStep={(id) => go(document.steps.findIndex((s) => s.id === id))}
-        />
+        <View style={styles.stick}>
+          <BenchStick
+            input={stick}
+            label="Story stick, your bench copy"
+            selected={step.id}
+            onStep={(id) => go(document.steps.findIndex((s) => s.id === id))}
+          />
+        </View>
         <View style={styles.step} nativeID="bench-step">
           {reading ? (
             <ReadingPanel
@@ -115,10 +117,12 @@ export function Workbench({ copy, personId }: { copy: BenchCopy; personId: strin
               size="bench"
               kind="primary"
               wide
-              label={state.ticks.has(step.id) ? 'Next' : 'Done, next'}
+              label={state.ticks.has(step.id) ? 'Next step' : 'Done, next step'}
               iconAfter="next"
               onPress={() => void done()}
-            />
+            >
+              Next
+            </Button>
           </View>
         )}
       </Row>
@@ -209,6 +213,7 @@ const styles = StyleSheet.create({
   },
   words: { flex: 1, minWidth: 0 },
   middle: webStyle({ flex: '1 1 0px', minHeight: 0, display: 'flex', flexDirection: 'row' }),
+  stick: webStyle({ flex: '0 0 52px', width: 52, display: 'flex', flexDirection: 'column' }),
   step: webStyle({ flex: '1 1 0px', minWidth: 0, overflowY: 'auto', padding: '16px' }),
   foot: { borderTopWidth: line.medium, borderTopColor: colour.ink, padding: 12 },
   next: { flex: 1 },

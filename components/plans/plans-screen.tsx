@@ -13,24 +13,25 @@ import { usePlans, type PlanFilter } from './plan-queries';
 
 const start: PlanFilter = { q: '', sort: 'newest' };
 const times = [
-  { value: '', label: 'any time' },
+  { value: 'any', label: 'any time' },
   { value: '120', label: 'up to 2 hours' },
   { value: '240', label: 'up to 4 hours' },
   { value: '480', label: 'up to a day' },
 ] as const;
 const skills = [
-  { value: '', label: 'any skill' },
+  { value: 'any', label: 'any skill' },
   { value: 'first', label: 'a first build' },
   { value: 'some', label: 'some practice' },
   { value: 'practised', label: 'practised hands' },
 ] as const;
+type SkillChoice = (typeof skills)[number]['value'];
 const sorts = [
   { value: 'newest', label: 'newest first' },
   { value: 'most-built', label: 'most built first' },
   { value: 'shortest', label: 'shortest first' },
 ] as const;
 const shops = [
-  { value: '', label: 'any shop' },
+  { value: 'any', label: 'any shop' },
   { value: 'drill', label: 'hand tools and a drill' },
   { value: 'drill,circular-saw,track-saw', label: 'no machines that stand' },
 ] as const;
@@ -61,20 +62,20 @@ export function PlansScreen() {
           <Select
             label="Time with waits"
             options={times}
-            value={String(filter.maxMinutes ?? '') as '120'}
+            value={String(filter.maxMinutes ?? 'any') as '120'}
             onChange={(v) => set({ maxMinutes: Number(v) || undefined })}
           />
           <Select
             label="Skill"
             options={skills}
-            value={filter.skill ?? ''}
-            onChange={(v) => set({ skill: v || undefined })}
+            value={(filter.skill ?? 'any') satisfies SkillChoice}
+            onChange={(v) => set({ skill: v === 'any' ? undefined : v })}
           />
           <Select
             label="Shop"
             options={shops}
-            value={(filter.machines ?? '') as 'drill'}
-            onChange={(v) => set({ machines: v || undefined })}
+            value={(filter.machines ?? 'any') as 'drill'}
+            onChange={(v) => set({ machines: v === 'any' ? undefined : v })}
           />
           <Select
             label="Order"
