@@ -7,7 +7,7 @@ import { Rational } from './rational';
 export interface Dual {
   x: number;
   q: Rational | null;
-  g: Float64Array | null;
+  g: readonly number[] | null;
 }
 
 export const exact = (q: Rational): Dual => ({ x: q.toNumber(), q, g: null });
@@ -22,7 +22,7 @@ function kept(q: Rational | null, x: number, g: Dual['g']): Dual {
 export function mix(a: Dual['g'], sa: number, b: Dual['g'], sb: number): Dual['g'] {
   if (!a && !b) return null;
   const size = (a ?? b)?.length ?? 0;
-  const g = new Float64Array(size);
+  const g: number[] = [];
   for (let i = 0; i < size; i += 1) g[i] = (a?.[i] ? sa * a[i]! : 0) + (b?.[i] ? sb * b[i]! : 0);
   return g;
 }

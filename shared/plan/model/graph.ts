@@ -59,8 +59,7 @@ export function evaluateFlow(
   const { flows, place } = taken;
   const lookup: Lookup = (symbol, asMade) => {
     const i = place.get(made || asMade ? `!${symbol}` : symbol) ?? 0;
-    const g = new Float64Array(flows.length);
-    g[i] = 1;
+    const g = flows.map((_, k) => (k === i ? 1 : 0));
     return { x: flows[i]?.x ?? NaN, q: flows[i]?.q ?? null, g };
   };
   const found = evaluate(node, lookup);
@@ -70,7 +69,7 @@ export function evaluateFlow(
   return { ok: true, flow: { x, q, slopes: chain(flows, g), curved } };
 }
 
-function chain(flows: readonly Flow[], g: Float64Array | null): ReadonlyMap<Source, number> {
+function chain(flows: readonly Flow[], g: readonly number[] | null): ReadonlyMap<Source, number> {
   if (flows.length === 1 && g?.[0] === 1) return flows[0]?.slopes ?? nothing;
   const slopes = new Map<Source, number>();
   flows.forEach((flow, i) => {

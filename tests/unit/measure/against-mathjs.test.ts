@@ -65,8 +65,7 @@ function ours(text: string, at: Point) {
   if (!read.ok) throw new Error(`${text}: ${read.fault.message}`);
   const lookup: Lookup = (symbol) => {
     const i = names.findIndex((name) => name === symbol);
-    const g = new Float64Array(3);
-    g[i] = 1;
+    const g = names.map((_, k) => (k === i ? 1 : 0));
     return { x: at[names[i]!], q: null, g };
   };
   return evaluate(read.node, lookup);
