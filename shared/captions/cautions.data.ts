@@ -4,7 +4,7 @@
  */
 export const cautionSigns: readonly { is: RegExp; weight: number }[] = [
   {
-    is: /^(?:wear|put on|wearing|throw on|grab|get|use|put) (?:\w+ ){0,3}(?:glasses|goggles|respirator|ear (?:plugs|muffs|defenders|protection)|eye protection|face shield|hearing protection|dust mask|mask|earplugs|ppe|apron|shield)\b/,
+    is: /^(?:wear|put on|wearing|throw on|grab|get|use|put) (?:\w+ ){0,3}(?:glasses|specs|goggles|visor|respirator|ear (?:plugs|muffs|defenders|protection)|eye protection|face shield|hearing protection|dust mask|mask|earplugs|ppe|apron|shield)\b/,
     weight: 2,
   },
   {
@@ -65,7 +65,7 @@ export const cautionSigns: readonly { is: RegExp; weight: number }[] = [
   },
   { is: /^(?:razor|sharp as|scalpel)\b/, weight: 1.2 },
   {
-    is: /^(?:catch fire|on fire|combust|spontaneous|spontaneously|burst into flames|fire hazard|oily rags?|flammable|explosive|heater)\b/,
+    is: /^(?:catch fire|on fire|combust|spontaneous|spontaneously|(?:up in|into|burst into) flames|fire hazard|oily rags?|flammable|explosive|heater)\b/,
     weight: 1.4,
   },
   {
@@ -128,8 +128,12 @@ export const cautionSigns: readonly { is: RegExp; weight: number }[] = [
   },
   { is: /^(?:is|it's|are) (?:not |no )?(?:a )?(?:joke|toy|messing)\b/, weight: 0.7 },
   { is: /^does not care\b/, weight: 0.6 },
+  { is: /^(?:hang|spread|lay) (?:the|those|your|any) (?:\w+ )?(?:rags|cloths)\b/, weight: 1 },
   { is: /^lay (?:them|it|the rags?|those) (?:out )?flat\b/, weight: 1 },
-  { is: /^(?:rags?|cloths?) (?:\w+ ){0,4}(?:flat|outside|water|fire|bin|metal)\b/, weight: 1 },
+  {
+    is: /^(?:oily )?(?:rags?|cloths?) (?:\w+ ){0,4}(?:flat|outside|outdoors|water|fire|flames|bin|metal)\b/,
+    weight: 1,
+  },
   {
     is: /^(?:check|look|scan|use a detector) (?:\w+ ){0,2}for (?:\w+ ){0,2}(?:nails|cables|pipes|wires|wiring|studs|metal|staples|screws)\b/,
     weight: 2,

@@ -27,7 +27,7 @@ data > dado | CUT WOOD shelf shallow housing stack across | file files computer 
 day doe, day dough, dato, day do, daydo, dotto > dado | CUT WOOD sit shelf wide deep stack | 
 datas, day does > dados | CUT WOOD shelf |
 tendon, tendons > tenon, tenons | JOINT CUT mortise | muscle doctor achilles injury knee pulled wrist
-tenant, tenants > tenon, tenons | mortise joint shoulder cheek saw glue fit | rent landlord house lease flat
+tenant, tenants > tenon, tenons | mortise joint shoulder cheek saw glue fit stretcher rung leg | rent landlord house lease flat
 more tease, more tees, morris, more tis, mortis, more this > mortise | tenon tendon tenons tendons JOINT chisel |
 mortar's, mortars > mortises | tenon tenons joint chisel |
 in grain, and grain, engrain > end grain | look glue wood plane glass soak smooth sand cut board seal absorb glassy shooting pass | ingrained
@@ -42,9 +42,10 @@ towel, towels, dowl, dowels > dowel, dowels, dowel, dowels | drill hole holes gl
 shell lack, shell act, shell ac, shellack, shell ack, sheila, shall act > shellac | FINISH |
 polly, paulie > poly | coat coats finish brush wipe dry satin | parrot
 in a corner clamp > corner clamp | GLUE |
-called, call, cauls, callus > caul, caul, cauls, caul | clamp clamps clamping pressure spreads joint curved panel waxed flat @ | phone it them me him that this name video so
+call, calls, called, callus > caul, cauls, caul, caul | clamp clamps clamping pressure spreads joint curved panel waxed flat @ | phone it them me him that this name video so
 curve, curf, curb, cursive, serve > kerf, kerf, kerf, kerf, kerf | saw blade wedge rip pinch close width table | radius template curved draw arc bend bent band street road dinner
 meter saw, might or saw, mighter saw, mitre soar, motor saw > miter saw | * |
+mighters, mitres', miders, my tours > miters | * |
 meter, motor, mighty, mider > miter, miter, miter, miter | +gauge +joint +joints +slot +box +cut +square +fence +sled | tall long parking metres
 plunge rotor, rotor > plunge router, router | plunge trim bit table cut groove slot template base edge collet straight | brake car helicopter wheel
 rooter, rudder, rotter > router | bit table cut groove slot template edge collet straight plunge | boat ship
@@ -75,7 +76,6 @@ joiner plane, joint or > jointer plane, jointer | flatten face edge square board
 plainer, plane her, planar > planer | board thickness pass passes jointer surface through stock feed |
 style, styles > stile, stiles | rail rails door doors frame panel cope groove tenon | hair music fashion old modern similar free your
 rails and styles > rails and stiles | * |
-baking soda, base board > base board | nothinghere |
 card kiss, carcase, car case, carcus, car kiss > carcass | cabinet side sides panel back shelf ply top bottom glue door doors box |
 drawer slights, draw slides, drawer sliced > drawer slides | * |
 draw, draws > drawer, drawers | slides slide runner runners bottom fronts front box boxes pull dovetail dovetails cabinet chest | pencil line lines sketch circle arc out picture
@@ -98,9 +98,7 @@ kickpack, kick bag, kick pack > kickback | saw blade table router |
 zero clear ants, zero clarence > zero clearance | insert throat plate saw table |
 push stic, bush stick, push sick > push stick | * |
 bush block, push black > push block | saw table jointer hand hands planer fingers |
-fence post driver > fence | nothinghere |
 arbor, harbor, harbour > arbor, arbor, arbour | blade saw nut wrench shaft washer | garden boat ship port sea
-dust collection, dust collector's > dust collector | nothinghere |
 guys, gauze, gage, gouge > gauge, gauge, gauge, gauge | marking depth feeler angle mortise cutting line wheel scribe | turning lathe bowl everybody hey you what's bandage roughing spindle sharpen carve
 gorge, gauge, googe > gouge, gouge, gouge | LATHE carve carving roughing spindle bowl | river wire brads feeler marking depth screws eighteen
 head stock, heads stock > headstock | LATHE |
@@ -117,14 +115,12 @@ scroll so > scroll saw | * |
 track so, truck saw, tracks all > track saw | * |
 hack so, hex saw > hacksaw | * |
 chop so > chop saw | * |
-crown molding, crown mauling > crown moulding | nothinghere |
 spline, splints, splint, splines > spline, splines, spline, splines | miter mitre corner corners key slot slots | doctor arm broken
 loose tendon, loose tenant > loose tenon | * |
 try square, tri square, dry square > try square | mark line check corner ninety blade stock pencil scribe |
 calibers, calibres, caliphers, calipers', callipers, caliber > calipers, calipers, calipers, calipers, calipers, calipers | measure measured thou thickness inch read reads reading jaws zero digital point diameter | gun bullet rifle
 my crowmeter, micro meter, mike rometer > micrometer | * |
 thou's, vow > thou, thou | two three four five six ten | wedding
-thousand, thousands > thou, thou | nothinghere |
 straight head, straightage, straight age > straightedge | flat lay check gap along ruler |
 lie nails, brats, breads, bradz > brads, brads, brads, brads | gauge nailer nail nails glue shoot pin tack | kids children sausage eat toast
 laggs, legs bolts, lag bolds, lack bolts, lack screws, leg bolts > lags, lag bolts, lag bolts, lag bolts, lag screws, lag bolts | * |
@@ -132,7 +128,6 @@ carriage bolds, cabbage bolts, carriage boats > carriage bolts | * |
 tea nut, tee nut, t net, teen nut, tea nuts > t nut, t nut, t nut, t nut, t nuts | bolt bolts thread threaded hammer hole drill knob | drink
 tea track, tee track, t trek > t track | * |
 threaded in search, threaded assert, threaded inset, threaded in certs > threaded insert | * |
-castors sugar, castor oil, castles, casters, pastors, cast her > casters, casters, casters, casters, casters, casters | nothinghere |
 pastor, pastors, castle, castles, costers > caster, casters, caster, casters, casters | wheel wheels locking swivel plate roll rolling cart bolt bolts | church sand king
 lineseed oil, linseed all, lindsey oil, lynn seed oil, linc seed oil > linseed oil | * |
 tongue oil, tung all, tongue all > tung oil | * |
@@ -140,19 +135,14 @@ danish all, dennis oil > danish oil | * |
 laquer, lack her, lacquered, locker, liquor > lacquer, lacquer, lacquer, lacquer, lacquer | coat coats spray finish brush sand thinner dry film | gym school drink bottle bar key
 varnished, vanish > varnish, varnish | coat coats finish brush spar sand dry satin | disappear gone
 paced wax, paste whacks, paste works, waist wax > paste wax | * |
-wood filler, would filler > wood filler | nothinghere |
 would glue, wood blue > wood glue | * |
-titebond > wood glue | nothinghere |
 spring joint, sprung joined > sprung joint | GLUE |
 cup in, copying saw, coughing saw, coping soar > coping saw | * |
 sand paper, sand pepper, san paper > sandpaper | * |
 grid, grits, great, grip, grid's > grit, grit, grit, grit, grit | sandpaper sand sanding sanded hundred eighty twenty forty paper sander scuff -80 -120 -150 -180 -220 -240 -320 -400 -twenty -eighty -forty -fifty | lines power graph idea job
 scribe lion, scribed lime > scribe line | * |
-ledger, lecture > ledger, ledger | nothinghere |
 joyce, joist's, choice, joyced, joists > joist, joist, joist, joist, joists | floor deck hanger beam framing hangers ceiling | your good personal best
 studs finder, stud fighter > stud finder | wall |
-dry wall, tri wall > drywall | nothinghere |
-plumb bob, plum bob > plumb bob | nothinghere |
 plum > plumb | level wall line post vertical check straight square | fruit jam tree tart wine
 level it's, spirit devil > spirit level | wall |
 lap joined, lab joint, lamp joint > lap joint | * |
@@ -161,20 +151,15 @@ butt joined, but joint, bought joint > butt joint | * |
 box joined, fox joint > box joint | * |
 finger joined > finger joint | * |
 tongue and grove, tongue in groove, tonguing groove > tongue and groove | * |
-grove, groves, groups > groove, grooves, grooves | panel router cut deep wide tongue plough bottom drawer slot bit dado runs | trees orange music band
-slat's, slots > slat, slats | nothinghere |
+grove, groves, groups > groove, grooves, grooves | panel router cut deep wide tongue plough bottom drawer slot bit dado runs glue bead fold along | trees orange music band
 batten, baton, batons, batting > batten, batten, battens, batten | wall screw board doors strip roof ledge brace hang | relay police orchestra baseball cricket
 arris, heiress, paris > arris, arris, arris | edge edges plane soften sand sharp break corner | france
-sizing, siding > sizing, siding | nothinghere |
-oil stoned, whetstone, wet stone, wetstone > oil stone, whetstone, whetstone, whetstone | nothinghere |
 strop's, stroppy, stropes > strop, strop, strop | leather sharpen edge blade compound honing | mood
 horning, owning > honing, honing | guide stone chisel edge sharpen angle bevel | horn house
-seal coat, sill coat > seal coat | nothinghere |
 stop blog, stopped block, shop block > stop block | fence saw cut length miter clamp same |
 bench docks, bench dog, bench docs > bench dogs, bench dog, bench dogs | * |
 hold fast, hold vast > holdfast | bench hole mallet hammer |
 crotch grain, rift saw, rift sewn, quarter sewn, quarter sun, quarter song > crotch grain, rift sawn, rift sawn, quarter sawn, quarter sawn, quarter sawn | oak grain board boards wood |
-chatter, shatter > chatter, chatter | nothinghere |
 snipe, snap, snip > snipe, snipe, snipe | planer thicknesser board ends infeed outfeed |
 out feed, outfit, out feet > outfeed, outfeed, outfeed | table saw roller support planer | clothes wearing
 in feed, infield > infeed, infeed | table planer roller jointer support | baseball

@@ -1,3 +1,4 @@
+import { singular } from './measures/counts';
 import { groups, mishearingLines } from './mishearings.data';
 import { spoken, type Token } from './tokens';
 import { type Correction, type Cue } from './types';
@@ -49,7 +50,7 @@ function entriesOf(line: string): Mishearing[] {
       meant: meant?.[i] ?? meant?.[meant.length - 1] ?? '',
       ...rest,
     }))
-    .filter((entry) => entry.heard.join(' ') !== entry.meant && !rest.near.has('nothinghere'));
+    .filter((entry) => entry.heard.join(' ') !== entry.meant);
 }
 
 /** All entries of the lexicon. */
@@ -77,10 +78,7 @@ function around(tokens: readonly Token[], from: number, to: number): string[] {
 function support(entry: Mishearing, tokens: readonly Token[], at: number): string[] | null {
   const to = at + entry.heard.length;
   const close = around(tokens, at, to);
-  if (
-    entry.against.size > 0 &&
-    close.slice(0).some((word, i) => entry.against.has(word) && isClose(i, at, tokens))
-  )
+  if (entry.against.size > 0 && close.some((word, i) => entry.against.has(word) && isClose(i, at)))
     return null;
   const next = tokens[to]?.w ?? '';
   const before = tokens[at - 1]?.w ?? '';
@@ -88,14 +86,15 @@ function support(entry: Mishearing, tokens: readonly Token[], at: number): strin
   if (entry.noun && !/^(?:a|an|the|my|with|each|every|of|some)$/.test(before)) return null;
   if (entry.next.has(next)) return [next];
   if (entry.before.size > 0 && !entry.before.has(before)) return null;
-  const found = [...new Set(close.filter((word) => entry.near.has(word)))];
+  const found = [
+    ...new Set(close.filter((word) => entry.near.has(word) || entry.near.has(singular(word)))),
+  ];
   return found.length > 0 ? found : null;
 }
 
 /** Against counts within five words. */
-function isClose(i: number, at: number, tokens: readonly Token[]): boolean {
+function isClose(i: number, at: number): boolean {
   const before = Math.min(reach, at);
-  void tokens;
   return i < before ? before - i <= 5 : i - before < 5;
 }
 

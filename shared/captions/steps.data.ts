@@ -50,6 +50,14 @@ export const openings: readonly { is: RegExp; weight: number }[] = [
   { is: /^now\b/, weight: 0.9 },
   { is: /^next\b/, weight: 1.4 },
   {
+    is: /^(?:so |and |okay |alright |right )*(?:first of all|first up|to start|let's start|i'll start|we start|start with|starting with|the first thing|the last thing|last thing|next job|next thing|next step|the next thing|the next step|almost done|nearly there|moving on|time for)\b/,
+    weight: 1.5,
+  },
+  {
+    is: /^(?:for the (?:\w+ )?\w+ (?:i|we|you|i'm|we're|up)\b|now (?:for|the|let's|we|i)|now to)\b/,
+    weight: 1.2,
+  },
+  {
     is: /^(?:step|part|stage) (?:one|two|three|four|five|six|seven|eight|nine|ten|\d+|number)\b/,
     weight: 2,
   },

@@ -97,9 +97,17 @@ function lengthCost(seconds: number): number {
   return ratio < 0 ? ratio * ratio * 0.9 : ratio * ratio * 0.8;
 }
 
+/** What a boundary must score: less in a file that has no silences to go by. */
+function need(cues: readonly Cue[]): number {
+  const silences = cues.filter(
+    (cue, i) => i > 0 && cue.start - (cues[i - 1]?.end ?? 0) >= 0.9,
+  ).length;
+  const expected = Math.max(1, ((cues[cues.length - 1]?.end ?? 0) - (cues[0]?.start ?? 0)) / 60);
+  return 0.95 + 0.8 * Math.min(1, silences / expected);
+}
+
 /** Boundaries that together score best. */
-function boundaries(cues: readonly Cue[], score: readonly number[]): number[] {
-  const need = 1.75;
+function boundaries(cues: readonly Cue[], score: readonly number[], need: number): number[] {
   const best: { sum: number; from: number }[] = [{ sum: 0, from: -1 }];
   const end = cues[cues.length - 1]?.end ?? 0;
   for (let i = 1; i <= cues.length; i += 1) {
@@ -145,7 +153,7 @@ function phaseOf(
 /** Stretches of the clip that may become steps, first to last, with nothing between them. */
 export function findStretches(cues: readonly Cue[], tokens: readonly Token[]): Stretch[] {
   if (cues.length === 0) return [];
-  const starts = [0, ...boundaries(cues, scores(cues, tokens))];
+  const starts = [0, ...boundaries(cues, scores(cues, tokens), need(cues))];
   return starts.map((from, place) => {
     const to = starts[place + 1] ?? cues.length;
     return { from, to, phase: phaseOf(cues, from, to, place, starts.length) };

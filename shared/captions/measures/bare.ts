@@ -3,19 +3,15 @@ import { singular } from './counts';
 import { type Quantity } from './quantity';
 import { type Found } from './special';
 import { near, type Talk, unitNear, wordBefore } from './talk';
+import { isTime } from './units';
+import { ruledOut } from './ruled-out';
 import {
   angleWords,
-  costs,
   dimensionWords,
   lumberNouns,
-  money,
-  namedNumbers,
-  neverCounted,
-  otherUnits,
   precise,
   sheetNouns,
   sizedNouns,
-  watched,
 } from './words.data';
 
 const telling =
@@ -30,71 +26,20 @@ function sizedBefore(tokens: readonly Token[], at: number, reach: number): boole
   return false;
 }
 
-/** Reasons against a bare number being a size. */
-function ruledOut(tokens: readonly Token[], at: number, to: number, q: Quantity): boolean {
-  const next = tokens[to]?.w ?? '';
-  const before = tokens[at - 1]?.w ?? '';
-  const ended = tokens[to - 1]?.end ?? false;
-  if (!ended && (otherUnits.has(next) || money.has(next) || watched.has(next))) return true;
-  if (
-    !ended &&
-    neverCounted.has(next) &&
-    !sizedNouns.has(next) &&
-    !dimensionWords.has(next) &&
-    next !== 'more'
-  )
-    return true;
-  if (namedNumbers.has(before) || money.has(before)) return true;
-  if (follows(tokens, to, 'square feet|foot|inches|metres|meters|yards|mil')) return true;
-  if (follows(tokens, to, 'of the|my|you|us|a|all|that|it')) return true;
-  if (
-    follows(
-      tokens,
-      to,
-      'turn|turns|way|empty|full|price|asleep|past|decent|baked|hearted|round|star|dozen',
-    )
-  )
-    return true;
-  if (follows(tokens, to, 'more|or') && q.value <= 3 && q.form === 'whole') return true;
-  if (
-    near(tokens, at, to, costs, 3, 1) &&
-    q.form === 'whole' &&
-    near(tokens, at, to, money, 12, 12)
-  )
-    return true;
-  if (q.form === 'whole' && q.value === 1) return true;
-  if (
-    q.form === 'whole' &&
-    follows(tokens, at - 1, 'the|these|those|this|that|which|any|every') &&
-    !dimensionWords.has(next)
-  )
-    return true;
-  if (q.form === 'whole' && follows(tokens, at - 1, "who is|like|mark|was|age|aged|turned|i'm"))
-    return true;
-  return year(tokens, at, q);
-}
-
-function year(tokens: readonly Token[], at: number, q: Quantity): boolean {
-  return (
-    Number.isInteger(q.said) &&
-    q.said >= 1900 &&
-    q.said <= 2099 &&
-    (q.form === 'hundreds' || q.form === 'written' || q.form === 'whole') &&
-    follows(tokens, at - 1, 'in|since|from|until|till|about|around|of|back|by|was')
-  );
-}
-
 /** How strongly the words say that a bare number is a size; 2 is enough. */
 function evidence(talk: Talk, at: number, to: number, q: Quantity, lastLength: number): number {
   const { tokens } = talk;
-  const next = tokens[to]?.w ?? '';
+  const ended = tokens[to - 1]?.end ?? false;
+  const next = ended ? '' : (tokens[to]?.w ?? '');
   let sum = formEvidence(q, talk, at);
-  if (dimensionWords.has(next) && !tokens[to - 1]?.end) sum += 3;
+  if (dimensionWords.has(next)) sum += 3;
   if (
     follows(tokens, to, 'from|up|off|down|back|short|in') &&
     follows(tokens, to + 1, 'the|each|from|one|this|that|either|both')
   )
     sum += 1.2;
+  if (!ended && follows(tokens, to, 'between|across')) sum += 1.2;
+  if (follows(tokens, at - 1, 'over') && at - lastLength <= 10) sum += 1;
   const k = follows(tokens, at - 1, 'about|around|roughly|exactly|just|maybe|like|say|only|a')
     ? at - 2
     : at - 1;
@@ -181,28 +126,69 @@ function unitOf(talk: Talk, at: number, q: Quantity): 'in' | 'mm' {
   return talk.units === 'mixed' && q.said >= 100 ? 'mm' : local;
 }
 
-/** A number without a unit that the words make a length or an angle. */
-export function readBare(
+/** What was read so far, as far as a number without a unit needs it. */
+export interface Heard {
+  /** Place after the last length. */
+  lastLength: number;
+  /** The measure before. */
+  last: Found | null;
+  /** Sizes said as exact decimals, so that "two forty two" is known again. */
+  known: ReadonlySet<number>;
+}
+
+const labels = new Set(['bottle', 'label', 'tin', 'can', 'instructions', 'packet', 'box', 'tub']);
+
+/** A number that goes on in the unit of the measure just before: an angle read again, minutes on the bottle, a speed. */
+function carried(
   talk: Talk,
   at: number,
+  to: number,
   q: Quantity,
-  lastLength: number,
-  known: ReadonlySet<number>,
+  last: Found | null,
 ): Found | null {
+  if (!last || dimensionWords.has(talk.tokens[to]?.w ?? '')) return null;
+  const away = at - last.from - last.n;
+  const before = last.values[0] ?? 0;
+  const same = { from: at, n: q.n, values: [q.said], unit: last.unit, inferred: true as const };
+  if (last.unit === 'deg' && away <= 18 && Math.abs(q.said - before) <= 2 && q.said > 3)
+    return same;
+  if (last.unit === 'rpm' && away <= 14 && q.said >= 100) return same;
+  if (isTime(last.unit) && away <= 8 && near(talk.tokens, at, at, labels, 4, 0)) return same;
+  return null;
+}
+
+const speedWords = new Set([
+  'running',
+  'run',
+  'runs',
+  'speed',
+  'router',
+  'spin',
+  'spinning',
+  'dial',
+  'rpm',
+  'lathe',
+  'revs',
+]);
+
+/** "running at eighteen thousand": a speed, for no size of a build is as large. */
+const asSpeed = (talk: Talk, at: number, to: number, q: Quantity): boolean =>
+  q.said >= 5000 && q.said <= 40_000 && near(talk.tokens, at, to, speedWords, 8, 5);
+
+/** A number without a unit that the words make a length, an angle or a speed. */
+export function readBare(talk: Talk, at: number, q: Quantity, heard: Heard): Found | null {
   const { tokens } = talk;
   const to = at + q.n;
   if (ruledOut(tokens, at, to, q)) return null;
-  if (asAngle(tokens, at, to, q))
-    return { from: at, n: q.n, values: [q.said], unit: 'deg', inferred: true };
-  const thou = asThou(talk, at, to, q, known);
-  if (evidence(talk, at, to, q, lastLength) + (thou ? 1.6 : 0) < 2) return null;
-  if (thou)
-    return {
-      from: at,
-      n: q.n,
-      values: [Number((q.said / 1000).toFixed(6))],
-      unit: 'in',
-      inferred: true,
-    };
-  return { from: at, n: q.n, values: [q.value], unit: unitOf(talk, at, q), inferred: true };
+  const base = { from: at, n: q.n, values: [q.said], inferred: true as const };
+  const same = carried(talk, at, to, q, heard.last);
+  if (same) return same;
+  if (asAngle(tokens, at, to, q)) return { ...base, unit: 'deg' };
+  if (asSpeed(talk, at, to, q)) return { ...base, unit: 'rpm' };
+  const thou = asThou(talk, at, to, q, heard.known);
+  if (evidence(talk, at, to, q, heard.lastLength) + (thou ? 1.6 : 0) < 2) return null;
+  if (thou) return { ...base, values: [Number((q.said / 1000).toFixed(6))], unit: 'in' };
+  const unit = unitOf(talk, at, q);
+  // Nothing in a shop is that long.
+  return q.value > (unit === 'in' ? 400 : 12_000) ? null : { ...base, values: [q.value], unit };
 }

@@ -1,8 +1,8 @@
 import { follows, type Token } from '../tokens';
 import { readNumber } from './numbers';
 import { readQuantity } from './quantity';
-import { readBolt, readQuarters, readScrew, type Found } from './special';
-import { near, type Talk, wordBefore } from './talk';
+import { pluralLumber, readBolt, readQuarters, readScrew, type Found } from './special';
+import { near, type Talk } from './talk';
 import { readUnit } from './units';
 import {
   adjectives,
@@ -93,7 +93,8 @@ const stopsCount = new Set([
 /** A size between the number and the thing counted: "two 18 gauge brads", "four number eight … screws". */
 function sizedThing({ tokens, ...talk }: Talk, at: number): boolean {
   const own = { tokens, ...talk };
-  const special = readScrew(own, at) ?? readBolt(own, at) ?? readQuarters(own, at);
+  const special =
+    readScrew(own, at) ?? readBolt(own, at) ?? readQuarters(own, at) ?? pluralLumber(tokens, at);
   const size = readQuantity(tokens, at);
   const chained = size ? chainEnd(tokens, at + size.n) : at;
   const n = special
@@ -143,7 +144,10 @@ export function readCount(talk: Talk, at: number): Found | null {
       : null;
   if (ofThem(tokens, at, to)) return count(number.n);
   if (follows(tokens, at - 1, pointing)) return null;
-  if (!readUnit(tokens, to) && sizedThing(talk, to)) return count(number.n);
+  if ((!readUnit(tokens, to) || follows(tokens, to, 'inch and')) && sizedThing(talk, to))
+    return count(number.n);
+  if (follows(tokens, to, 'or so') && sizedThing(talk, to + 2)) return count(number.n);
+  if (follows(tokens, to, 'doors down')) return null;
   if (readUnit(tokens, to) && !/^(?:min|second)$/.test(tokens[to]?.w ?? '')) return null;
   const noun = countedNoun(tokens, to);
   if (!noun) return null;
@@ -188,7 +192,6 @@ function ofThem(tokens: readonly Token[], at: number, to: number): boolean {
       tokens,
       to + 1,
       'end|side|corner|hinge|joint|leg|rail|door|shelf|drawer|board|edge|bracket|cleat|piece',
-    ) &&
-    wordBefore(tokens, at, makingVerbs, 8) >= 0
+    )
   );
 }

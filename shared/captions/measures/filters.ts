@@ -53,6 +53,7 @@ export function belongs(talk: Talk, found: Found): boolean {
   if (isTime(found.unit)) return timeOfWork(talk, found);
   if (found.unit === 'percent') return near(tokens, found.from, to, percentWords, 6, 4);
   if (found.unit === 'lb' && near(tokens, found.from, to, costs, 5, 2)) return false;
+  if (follows(tokens, to, 'lighter|heavier|richer|poorer')) return false;
   const single = follows(tokens, found.from, 'a|an') && found.values[0] === 1;
   if (single && (found.unit === 'lb' || found.unit === 'kg')) return false;
   if (single && found.unit === 'ft')
@@ -80,7 +81,7 @@ export function belongs(talk: Talk, found: Found): boolean {
 }
 
 /** Degrees of heat are not an angle. */
-export function asTemperature({ tokens }: Talk, found: Found): Found {
+export function asTemperature({ tokens, units }: Talk, found: Found): Found {
   if (
     found.unit !== 'deg' ||
     !near(tokens, found.from, found.from + found.n, temperatureWords, 5, 4)
@@ -95,7 +96,7 @@ export function asTemperature({ tokens }: Talk, found: Found): Found {
     ) >= 0
   )
     return found;
-  return { ...found, unit: 'C' };
+  return { ...found, unit: units === 'imperial' ? 'F' : 'C' };
 }
 
 /** Pounds that squeeze are a force, pounds that hang are a weight. */

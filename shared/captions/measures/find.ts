@@ -3,6 +3,7 @@ import { type MeasureUnit } from '../types';
 import { readBare } from './bare';
 import { readCount } from './counts';
 import { asTemperature, belongs } from './filters';
+import { readNumber } from './numbers';
 import { readChain, readQuantity, type Chain, type Quantity } from './quantity';
 import {
   asFastener,
@@ -23,6 +24,8 @@ interface Memory {
   lastGrit: number;
   /** Sizes said as exact decimals, so that "two forty two" is known again. */
   known: Set<number>;
+  last: Found | null;
+  lastCount: number;
 }
 
 function special(talk: Talk, at: number, memory: Memory): Found | null {
@@ -116,7 +119,7 @@ function quantityAt(talk: Talk, at: number, memory: Memory): { found: Found | nu
   if (range) return { found: range, n: range.n };
   if (first.unit)
     return { found: { from: at, n: first.n, values: [first.value], unit: first.unit }, n: first.n };
-  return { found: readBare(talk, at, first, memory.lastLength, memory.known), n: first.n };
+  return { found: readBare(talk, at, first, memory), n: first.n };
 }
 
 function numberStarts(tokens: readonly Token[], at: number): boolean {
@@ -128,7 +131,13 @@ function numberStarts(tokens: readonly Token[], at: number): boolean {
 /** All measures among the tokens, in order. */
 export function findMeasures(talk: Talk): Found[] {
   const { tokens } = talk;
-  const memory: Memory = { lastLength: -99, lastGrit: -99, known: new Set() };
+  const memory: Memory = {
+    lastLength: -99,
+    lastGrit: -99,
+    known: new Set(),
+    last: null,
+    lastCount: -99,
+  };
   const all: Found[] = [];
   let at = 0;
   while (at < tokens.length) {
@@ -157,17 +166,26 @@ function measureAt(talk: Talk, at: number, memory: Memory): { found: Found | nul
       chain.found.unit === 'screw' ||
       chain.found.unit === 'bolt' ||
       chain.found.values.length > 1);
-  const count = named ? null : readCount(talk, at);
-  if (count) return { found: count, n: countTokens(talk, count) };
+  const count = named ? null : (readCount(talk, at) ?? countAgain(talk, at, memory));
+  if (count) return { found: count, n: count.n };
   if (!chain.found || !belongs(talk, chain.found)) return { found: null, n: chain.n };
   return { found: asTemperature(talk, chain.found), n: chain.n };
 }
 
-/** A count takes its number only when a size stands between it and its noun. */
-const countTokens = (_talk: Talk, count: Found): number => count.n;
+/** "eight boards at thirty six … and eight at sixteen": the second eight counts what the first did. */
+function countAgain({ tokens }: Talk, at: number, memory: Memory): Found | null {
+  const number = readNumber(tokens, at);
+  if (!number || number.form !== 'whole' || number.value > 60 || at - memory.lastCount > 18)
+    return null;
+  if (!follows(tokens, at + number.n, 'at') || !follows(tokens, at - 1, 'and|then|plus|another'))
+    return null;
+  return { from: at, n: number.n, values: [number.value], unit: 'count' };
+}
 
 function remember(memory: Memory, found: Found, all: Found[]): void {
   all.push(found);
+  memory.last = found;
+  if (found.unit === 'count') memory.lastCount = found.from;
   if (!isLength(found.unit)) return;
   memory.lastLength = found.from + found.n;
   for (const value of found.values) if (found.unit === 'in' && value < 1) memory.known.add(value);

@@ -142,6 +142,17 @@ function hundreds(tokens: readonly Token[], at: number): (SpokenNumber & { open:
   return shorthand(tokens, at, head) ?? { ...head, form: 'whole', open: true };
 }
 
+/** "three eight nine" for 389, but not "one two three". */
+function digitByDigit(tokens: readonly Token[], at: number): number | null {
+  const [a, b, c] = [0, 1, 2].map((k) => digit(tokens[at + k]?.w));
+  if (a === undefined || b === undefined || c === undefined) return null;
+  if (tokens[at]?.comma || tokens[at + 1]?.comma || tokens[at]?.end || tokens[at + 1]?.end)
+    return null;
+  if (isDenominator(tokens, at + 3) || (b === a + 1 && c === b + 1)) return null;
+  const next = tokens[at + 3]?.w;
+  return next === 'point' || next === 'hundred' || next === 'by' ? null : a * 100 + b * 10 + c;
+}
+
 /** "two forty two", "five oh six", "seventeen fifty": hundreds without the word. */
 function shorthand(
   tokens: readonly Token[],
@@ -150,6 +161,8 @@ function shorthand(
 ): (SpokenNumber & { open: boolean }) | null {
   const i = at + head.n;
   if (head.value < 1 || tokens[i - 1]?.comma || tokens[i - 1]?.end) return null;
+  const digits = digitByDigit(tokens, at);
+  if (digits !== null) return { value: digits, n: 3, form: 'hundreds', open: false };
   if (tokens[i]?.w === 'oh' && head.value < 100) {
     const d = digit(tokens[i + 1]?.w);
     if (d !== undefined && tokens[i + 2]?.w !== 'oh')

@@ -257,7 +257,7 @@ const plurals: Record<string, number> = {
   twelves: 12,
 };
 
-function pluralLumber(tokens: readonly Token[], at: number): Found | null {
+export function pluralLumber(tokens: readonly Token[], at: number): Found | null {
   const a = readNumber(tokens, at);
   if (!a || !whole(a.value) || a.value > 8 || !follows(tokens, at + a.n, 'by')) return null;
   const b = plurals[tokens[at + a.n + 1]?.w ?? ''];

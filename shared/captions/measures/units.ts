@@ -110,7 +110,7 @@ export function readUnit(tokens: readonly Token[], at: number, written = false):
   if (written && w === 'in' && tokens[at + 1]?.w !== 'from')
     return tokens[at]?.end ||
       tokens[at]?.comma ||
-      /^(?:long|wide|deep|thick|high|tall|x|by|ply|diameter)$/.test(tokens[at + 1]?.w ?? '')
+      /^(?:long|wide|deep|thick|high|tall|x|by|ply)$/.test(tokens[at + 1]?.w ?? '')
       ? { unit: 'in', factor: 1, n: 1 }
       : null;
   if (written && w === 'm') return { unit: 'mm', factor: 1000, n: 1 };

@@ -9,7 +9,7 @@ export const countables = set(`
   screw bolt nail brad lag nut washer hinge magnet caster castor wheel handle knob pull clip staple insert bushing bearing
   tack rivet hook eye bracket slide latch catch clamp cramp caul layer coat pass ply lamination stick length sheet picket plank
   spindle leg rung seat arm template jig box tray card shim stud cup disc disk ring segment stave ball button anchor fixing
-  cut wrap turn stack roller chock tile brick bag row column tab tail tenon shoulder corner cheek jaw handle hanger standoff wood
+  cut wrap turn stack roller chock tile brick bag tab tail tenon shoulder corner cheek jaw handle hanger standoff wood
   timber stretcher crossmember crosspiece frame knee hub spoke axle tee bar rod tube tube crosscut lap strap band bead turnbuckle
   spring threaded sleeper upright partition compartment section holder rack hoop cap collar ferrule sleeve gib coupler
   drop dab squirt stroke swipe`);
@@ -29,8 +29,8 @@ export const neverCounted = set(`
 /** Verbs that make or fix things: a number of anything after one of them is a count. */
 export const makingVerbs = set(`
   cut cutting make making made need needs needed drill drilling drilled use using used add adding added bore boring glue gluing rip
-  ripping mill milling take takes took run ran running put putting drive driving drove get gets got install installing fit fitting want
-  build building lay laying set setting apply applying shoot pop tack place placed buy bought grab has have having plus with`);
+  ripping mill milling take takes took run ran running put putting drive driving drove install installing fit fitting want
+  build building lay laying set setting apply applying shoot pop tack place placed buy bought grab plus with`);
 
 /** Words that come between a number and the thing counted. */
 export const adjectives = set(`
@@ -101,7 +101,7 @@ export const ratioWords =
   slope pitch taper dovetail dovetails dovetailed`);
 /** Words right after a number that make it something else than a length. */
 export const otherUnits =
-  set(`volt volts amp amps watt watts horsepower hp o'clock am pm mph bit tooth teeth flute flutes speed stroke
+  set(`volt volts amp amps watt watts horsepower hp o'clock am pm mph tooth teeth flute flutes speed stroke
   litre litres liter liters gallon gallons ounce ounces gram grams bar psi cfm db decibels lumens star stars year-old yearold`);
 export const namedNumbers =
   set(`number video part step project chapter episode season volume route version revision page lesson rule tip figure mark take model
