@@ -115,10 +115,18 @@ function read<T>(text: string, run: () => T): Read<T> {
   }
 }
 
+/** Trees of texts read lately: a plan is read again and again while it is drafted. Trees never change. */
+const seen = new Map<string, Read<Node>>();
+
 /** Reads an expression into its tree, or says what is wrong and where. Bounded in length and depth. */
 export function parseExpression(text: string): Read<Node> {
   if (/^[A-Za-z]\w*$/.test(text)) return { ok: true, node: { t: 'sym', name: text, at: 0 } };
-  return read(text, () => parse(text, { ...options, startRule: 'Expression' }));
+  const known = seen.get(text);
+  if (known) return known;
+  const found = read(text, () => parse(text, { ...options, startRule: 'Expression' }));
+  if (seen.size >= 5000) seen.clear();
+  if (text.length <= 200) seen.set(text, found);
+  return found;
 }
 
 const counts: Partial<Record<CheckNode['op'], number>> = { between: 3, fit: 4 };
