@@ -28,6 +28,7 @@ export {
   type DisplayPreference,
   type Grid,
 } from './display';
+export { displayValue, type DisplayValue } from './display-value';
 export { term, termList, type Term, type TermSide } from './terms';
 export {
   parseExpression,
@@ -40,7 +41,7 @@ export { type CheckNode, type Node } from './expression-node';
 export { FaultError, nearest, type ExpressionFault } from './expression-fault';
 export { expectKind, expectSame, kindsOf, type KindScope } from './expression-kinds';
 export { factsOf, type ExpressionFacts } from './expression-facts';
-export { kindName, kindPowers, samePowers, isPlain, type Powers } from './kinds';
+export { kindName, kindOf, kindPowers, samePowers, isPlain, type Powers } from './kinds';
 export { evaluate, evaluateNode, type Lookup } from './evaluate';
 export { exact, type Dual } from './dual';
 export { bounds, type Interval } from './interval';

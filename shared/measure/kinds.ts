@@ -49,9 +49,13 @@ const names: Partial<Record<Kind, string>> = {
   number: 'a plain number',
 };
 
+/** The kind with these exponents, or null for any other product. */
+export const kindOf = (powers: Powers): Kind | null =>
+  (Object.keys(names) as Kind[]).find((k) => samePowers(byKind[k], powers)) ?? null;
+
 /** `a length`, `an area`, `a plain number`; other products by their factors. */
 export function kindName(powers: Powers): string {
-  const kind = (Object.keys(names) as Kind[]).find((k) => samePowers(byKind[k], powers));
+  const kind = kindOf(powers);
   if (kind) return names[kind] ?? kind;
   const factors = bases.flatMap((base, i) => {
     const power = powers[i] ?? 0;

@@ -1,5 +1,5 @@
 import { type CheckNode, factsOf, type Node } from '../../measure';
-import { type Check } from '../document';
+import { type Check, type Kind } from '../document';
 import { type FitWord } from '../document-dimensions';
 import { type Compiled } from './compile';
 import { evaluateFlow, type Graph } from './graph';
@@ -19,6 +19,7 @@ import { type Source } from './source';
 export interface CheckEntry {
   check: Check;
   compiled: Compiled<CheckNode>;
+  kind: Kind;
   inputs: readonly string[];
   mentions: ReadonlySet<string>;
 }
@@ -162,6 +163,7 @@ function judged(graph: Graph, entry: CheckEntry, node: CheckNode): CheckState {
       return {
         id: check.id,
         check,
+        kind: entry.kind,
         ...blank,
         verdict: 'needs-a-reading',
         error: { in: 'expression', ...found.fault },
@@ -176,6 +178,7 @@ function judged(graph: Graph, entry: CheckEntry, node: CheckNode): CheckState {
   return {
     id: check.id,
     check,
+    kind: entry.kind,
     verdict,
     margin: Math.min(...rooms.map(({ stack }) => stack.x)),
     worstMargin: tight.stack.low,
@@ -196,7 +199,7 @@ export function evaluateCheck(
   given: ModelReadings | null,
 ): CheckState {
   const { check, compiled } = entry;
-  const plain = { id: check.id, check, ...blank };
+  const plain = { id: check.id, check, kind: entry.kind, ...blank };
   const byHand = !check.answeredBy.includes('figures');
   const state: CheckState = compiled.ok
     ? judged(graph, entry, compiled.node)

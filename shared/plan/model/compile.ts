@@ -5,6 +5,7 @@ import {
   type ExpressionFault,
   factsOf,
   FaultError,
+  kindOf,
   kindPowers,
   type KindScope,
   kindsOf,
@@ -83,6 +84,12 @@ function checked<T extends Node | CheckNode>(
     if (error instanceof FaultError) return { ok: false, fault: error.fault, facts };
     throw error;
   }
+}
+
+/** Of what a check's margins are. */
+export function checkKind(compiled: Compiled<CheckNode>, scope: KindScope): Kind {
+  const [first] = compiled.ok ? compiled.node.args : [];
+  return (first && kindOf(kindsOf(first, scope))) ?? 'length';
 }
 
 /** Compiles a check; both sides of each comparison must be of one kind. */

@@ -1,6 +1,6 @@
 import { type KindScope } from '../../measure';
 import { type Dimension, type PlanDocument } from '../document';
-import { compileCheck } from './compile';
+import { checkKind, compileCheck } from './compile';
 import { type CheckEntry } from './check';
 import { compileEntry, type Entry, inputsOf, mentionsOf, scopeOf, symbolTable } from './entry';
 import { compilePart, type PartEntry } from './part';
@@ -76,7 +76,13 @@ export function compileModel(document: PlanDocument, before?: CompiledModel): Co
     }
     const compiled = compileCheck(check.expression, scope);
     const inputs = inputsOf([compiled], symbols);
-    checks.set(check.id, { check, compiled, inputs, mentions: mentionsOf([compiled]) });
+    checks.set(check.id, {
+      check,
+      compiled,
+      inputs,
+      mentions: mentionsOf([compiled]),
+      kind: checkKind(compiled, scope),
+    });
   }
   const dependents = rewired || !old ? dependentsOf(entries) : old.dependents;
   return { document, symbols, scope, entries, dependents, checks, parts };

@@ -1,5 +1,5 @@
 import { instrumentFacts, type Rational, uncertaintyOf, type Uncertainties } from '../../measure';
-import { type InstrumentName, type Sense } from '../document';
+import { type InstrumentName, type Kind, type Sense } from '../document';
 import { type DimensionState } from './types';
 
 export type ReadingVerdict = 'inside' | 'over' | 'under' | 'no-band';
@@ -14,6 +14,7 @@ export interface ReadingJudgement {
   /** `work` it down or open it up, `move` it, `set` it again, `keep`: it cannot be put back. */
   cure: 'none' | 'work' | 'move' | 'set' | 'cannot';
   sense: Sense;
+  kind: Kind;
   /** The instrument is coarse for this tolerance; finer ones to reach for, or a trial. */
   coarse: { uncertainty: number; tolerance: number; finer: readonly InstrumentName[] } | null;
 }
@@ -60,7 +61,7 @@ export function judgeReading(
     band && tolerance > 0 && uncertainty > tolerance / 4
       ? { uncertainty, tolerance, finer: finerThan(instrument, tolerance, own) }
       : null;
-  return { verdict, amount, off, cure: cureFor(sense, verdict), sense, coarse };
+  return { verdict, amount, off, cure: cureFor(sense, verdict), sense, kind: state.kind, coarse };
 }
 
 function finerThan(instrument: InstrumentName, tolerance: number, own?: Uncertainties) {

@@ -104,6 +104,8 @@ export type Advice =
 export interface CheckState {
   id: string;
   check: Check;
+  /** Of what its margins are. */
+  kind: Kind;
   verdict: CheckVerdict;
   /** Room left at nominal, and with everything at its worst; below 0 it fails. null with an error or no figures. */
   margin: number | null;

@@ -1,11 +1,5 @@
-import {
-  displayDifference,
-  displayLength,
-  displayMm,
-  type DisplayPreference,
-  Rational,
-} from '../../measure';
-import { type InstrumentName } from '../document';
+import { displayValue, displayLength, displayMm, type DisplayPreference } from '../../measure';
+import { type InstrumentName, type Kind } from '../document';
 import { type ReadingJudgement } from './judge';
 import { type PlanModel } from './model';
 import { type CheckState, type PartState, type SizeState, type Stack } from './types';
@@ -23,8 +17,8 @@ const instrumentWords: Record<InstrumentName, string> = {
 };
 
 /** A difference without its sign, fine enough to act on. */
-const amountText = (mm: number, pref: DisplayPreference): string =>
-  displayDifference(Rational.fromNumber(Math.abs(mm)), pref).text.replace(/^\+/, '');
+const amountText = (x: number, kind: Kind, pref: DisplayPreference): string =>
+  displayValue(Math.abs(x), kind, pref, true).text.replace(/^\+/, '');
 
 /** A stack's nominal as a figure for the person's unit. */
 export function figureOf(value: Stack, pref: DisplayPreference) {
@@ -40,7 +34,7 @@ export function formatParts(part: PartState, pref: DisplayPreference): string {
 
 /** What to do about a reading, such as `0.4 mm over: one more pass.` */
 export function describeReading(judged: ReadingJudgement, pref: DisplayPreference): string {
-  const { verdict, amount, cure, sense } = judged;
+  const { verdict, amount, cure, sense, kind } = judged;
   if (verdict === 'no-band') return 'Kept. This figure counts from here on.';
   if (verdict === 'inside') return 'Inside the band.';
   const work =
@@ -56,7 +50,7 @@ export function describeReading(judged: ReadingJudgement, pref: DisplayPreferenc
     set: 'set it again',
     cannot: done,
   };
-  return `${amountText(amount, pref)} ${verdict}: ${cures[cure]}.`;
+  return `${amountText(amount, kind, pref)} ${verdict}: ${cures[cure]}.`;
 }
 
 /** Says that an instrument is coarse for a tolerance, and what to reach for; empty when it is fine enough. */
@@ -66,7 +60,7 @@ export function describeCoarse(judged: ReadingJudgement, pref: DisplayPreference
   const better = finer[0]
     ? `Use a ${instrumentWords[finer[0]]}`.replace('a calipers', 'calipers')
     : 'Make a trial';
-  return `This instrument reads to ±${amountText(uncertainty, pref)}; the tolerance is ±${amountText(tolerance, pref)}. ${better}${finer[0] ? ', or make a trial' : ''}.`;
+  return `This instrument reads to ±${amountText(uncertainty, judged.kind, pref)}; the tolerance is ±${amountText(tolerance, judged.kind, pref)}. ${better}${finer[0] ? ', or make a trial' : ''}.`;
 }
 
 const verdictWords = {
@@ -86,11 +80,12 @@ function adviceText(model: PlanModel, state: CheckState, pref: DisplayPreference
   if (first.do === 'try') return 'Make a trial.';
   if (first.do === 'look') return 'Take a look.';
   const dimension = model.dimensions.get(first.dimensionId)?.dimension;
+  const kind = dimension?.kind ?? 'length';
   const name = (dimension?.name ?? dimension?.symbol ?? 'it').toLowerCase();
   if (first.do === 'read') return `Measure the ${name}.`;
   if (first.do === 'hold')
-    return `Hold the ${name} to ±${amountText(first.tolerance, pref)} and this holds.`;
-  return `Make the ${name} ${amountText(first.by, pref)} ${first.by < 0 ? 'smaller' : 'larger'} and this holds.`;
+    return `Hold the ${name} to ±${amountText(first.tolerance, kind, pref)} and this holds.`;
+  return `Make the ${name} ${amountText(first.by, kind, pref)} ${first.by < 0 ? 'smaller' : 'larger'} and this holds.`;
 }
 
 /** A check in a sentence or two: the margins, the share, and what would mend it. */
@@ -101,20 +96,20 @@ export function describeCheck(
 ): string {
   if (state.error) return `${state.error.message} ${state.error.cure}`;
   const advice = adviceText(model, state, pref);
-  const { verdict, margin, worstMargin, share } = state;
+  const { verdict, margin, worstMargin, share, kind } = state;
   if (state.answeredBy === 'trial')
     return verdict === 'holds' ? 'The trial fits.' : 'The trial does not fit.';
   if (state.answeredBy === 'look')
     return verdict === 'holds' ? 'Looked at, and good.' : 'Looked at, and not good.';
   if (verdict === 'needs-a-reading' || margin === null || worstMargin === null)
     return `Needs a reading. ${advice}`.trim();
-  const room = amountText(margin, pref);
+  const room = amountText(margin, kind, pref);
   if (verdict === 'holds')
-    return `Holds with ${amountText(worstMargin, pref)} to spare at the worst.`;
+    return `Holds with ${amountText(worstMargin, kind, pref)} to spare at the worst.`;
   if (verdict === 'fails') return `Fails by ${room}. ${advice}`.trim();
   if (verdict === 'too-close')
     return `Too close to call: ${room} ${margin < 0 ? 'short' : 'to spare'}, less than the instrument can tell. Use a finer one, or make a trial.`;
   const part =
     share === null ? '' : ` About ${Math.round(share * 100)} % hold (normal model, three sigma).`;
-  return `At risk: ${room} to spare, ${amountText(worstMargin, pref)} short at the worst.${part} ${advice}`.trim();
+  return `At risk: ${room} to spare, ${amountText(worstMargin, kind, pref)} short at the worst.${part} ${advice}`.trim();
 }

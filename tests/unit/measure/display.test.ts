@@ -1,6 +1,7 @@
 import { inchRows, roundingRows } from '../../data/measure/rounding.data';
 import {
   displayLength,
+  displayValue,
   parseLength,
   Rational,
   term,
@@ -60,6 +61,17 @@ describe('Shown lengths', () => {
     const shown = displayLength(exact('3/4 in').negate(), tape);
     expect(shown).toMatchObject({ sign: '−', text: '−3/4 in' });
     expect(shown.spoken).toBe('minus three quarters of an inch');
+  });
+
+  test.each([
+    [45.5, 'angle', '45.5°', '45.5 degrees'],
+    [90, 'duration', '1.5 h', '1.5 hours'],
+    [20, 'duration', '20 min', 'twenty minutes'],
+    [-2, 'mass', '−2 kg', 'minus two kilograms'],
+    [4, 'count', '4', 'four'],
+    [18, 'length', '11/16 in', 'eleven sixteenths of an inch'],
+  ] as const)('%f as %s is %s', (x, kind, text, spoken) => {
+    expect(displayValue(x, kind, tape)).toMatchObject({ text, spoken });
   });
 
   test('speaks mixed figures and picks the terms of a side', () => {

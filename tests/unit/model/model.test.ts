@@ -166,6 +166,29 @@ describe('The model', () => {
     );
   });
 
+  test('angles are judged and said in degrees', () => {
+    const plan = planOf(
+      [
+        {
+          symbol: 'bevel',
+          kind: 'angle',
+          expression: '45',
+          tolerance: pm('0.5'),
+          sense: 'setting',
+        },
+        { symbol: 'rise', origin: 'derived', expression: '100 mm * tan(bevel)' },
+      ],
+      [{ expression: 'bevel <= 45.2 deg' }],
+    );
+    const model = createModel(plan);
+    expect(model.dimensions.get(idOf(1, 1))?.value?.x).toBeCloseTo(100, 9);
+    const state = model.dimensions.get(idOf(1, 0))!;
+    const judged = judgeReading(state, Rational.of(46), 'angle-gauge');
+    expect(describeReading(judged, mm)).toBe('0.5° over: set it again.');
+    const check = model.checks.get(idOf(2, 0))!;
+    expect(describeCheck(model, check, mm)).toMatch(/^At risk: 0.2° to spare, 0.3° short/);
+  });
+
   test('a change recomputes what depends on it and keeps the rest', () => {
     const plan = box();
     const model = createModel(plan);
