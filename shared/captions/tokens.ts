@@ -79,6 +79,15 @@ export function piecesOf(raw: string): string[] {
   return out;
 }
 
+/** An "x" on its own between two sizes is "by". */
+function joins(tokens: readonly Token[], cues: readonly Cue[], cue: number, word: number): boolean {
+  const before = tokens[tokens.length - 1]?.w;
+  const next = cues[cue]?.words[word + 1]?.text ?? cues[cue + 1]?.words[0]?.text ?? '';
+  return (
+    /^\d/.test(next) && (isNumber(before) || /^(?:inch|foot|mm|cm|in|ft|m)$/.test(before ?? ''))
+  );
+}
+
 /** All words of the captions as tokens. */
 export function tokensOf(cues: readonly Cue[]): Token[] {
   const tokens: Token[] = [];
@@ -87,7 +96,8 @@ export function tokensOf(cues: readonly Cue[]): Token[] {
     cue.words.forEach((word, k) => {
       if (/^[[(♪]/.test(word.text)) return;
       const pieces = piecesOf(word.text);
-      pieces.forEach((w, p) => {
+      pieces.forEach((each, p) => {
+        const w = each === 'x' && joins(tokens, cues, c, k) ? 'by' : each;
         const last = p === pieces.length - 1;
         tokens.push({
           w,

@@ -284,7 +284,13 @@ export function readFraction(tokens: readonly Token[], at: number): SpokenNumber
   const up = below100(tokens, at) ?? (w && w.value < 100 ? w : null);
   if (!up || up.value < 1) return null;
   const down = readDenominator(tokens, at + up.n);
-  if (!down || up.value >= down.value || (up.value > 1 && down.value === 2)) return null;
+  // "two quarter twenty bolts" are two of a quarter, not two quarters.
+  const even =
+    up.value % 2 === 0 &&
+    down !== null &&
+    (!down.plural || down.value === 4) &&
+    down.value % 2 === 0;
+  if (!down || up.value >= down.value || even) return null;
   return { value: up.value / down.value, n: up.n + down.n, form: 'fraction', part: down.value };
 }
 

@@ -148,7 +148,8 @@ function unitAfter(tokens: readonly Token[], at: number, number: SpokenNumber, w
     return inner ? { ...inner, n: inner.n + 1 } : null;
   }
   const unit = readUnit(tokens, at, written);
-  if (unit && tokens[at]?.w === 'of' && number.form !== 'fraction') return null;
+  if (unit && tokens[at]?.w === 'of' && number.form !== 'fraction' && number.value >= 1)
+    return null;
   // "five second coats"? a single second after more than one is an ordinal unless something is timed by it.
   if (
     unit?.unit === 's' &&
