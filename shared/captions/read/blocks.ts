@@ -24,6 +24,8 @@ export function readBlocks(
   let current: RawCue | null = null;
   let skipping = vtt;
   let blank = true;
+  // In WebVTT a line of spaces is text; only an empty one ends a block.
+  const isBlank = (line: string) => (vtt ? line : line.trim()) === '';
   lines.forEach((line, i) => {
     const times = readTiming(line);
     if (times) {
@@ -41,7 +43,7 @@ export function readBlocks(
       });
       current = null;
       skipping = true;
-    } else if (line.trim() === '') {
+    } else if (isBlank(line)) {
       skipping = false;
       if (vtt) current = null;
     } else if (blank && skipped.test(line) && vtt) {
@@ -51,7 +53,7 @@ export function readBlocks(
       // In SubRip a blank line may stand inside a caption; only a counter ends it.
       if (!(blank && /^\s*\d+\s*$/.test(line) && nextIsTiming(lines, i))) current.lines.push(line);
     }
-    blank = line.trim() === '';
+    blank = isBlank(line);
   });
   return cues;
 }
