@@ -31,7 +31,9 @@ export const useCopy = (copyId: string) =>
   useQuery({
     queryKey: keys.copy(copyId),
     queryFn: ({ signal }) => call(getCopy, { params: { copyId }, signal }),
-    staleTime: staleTimes.bench,
+    // Kept in the browser, but always asked again: what was sent just before a reload must show.
+    staleTime: 0,
+    refetchOnMount: 'always',
   });
 
 export function useStartCopy() {

@@ -60,7 +60,7 @@ export function makeQueryClient(): QueryClient {
 
 export const persister = createAsyncStoragePersister({
   key: 'scantling-queries',
-  throttleTime: 500,
+  throttleTime: 0,
   storage: {
     getItem: (key: string) => get<string>(key).then((v) => v ?? null),
     setItem: (key: string, value: string) => set(key, value),

@@ -5,7 +5,7 @@ import { join } from 'node:path';
 import pino from 'pino';
 import { v5 } from 'uuid';
 import { type Role } from '../../shared/api/accounts';
-import { toVtt, type Cue } from '../../shared/captions';
+import { toVtt } from '../../shared/captions';
 import { makeDataSource } from '../db/data-source';
 import { PersonEntity } from '../db/entities/person';
 import { planDocumentSchema } from '../../shared/plan/document';
@@ -80,6 +80,13 @@ const people: Who[] = [
 
 type Cast = Record<string, PersonEntity>;
 
+/** A caption as the demo says it. */
+interface Spoken {
+  start: number;
+  end: number;
+  text: string;
+}
+
 async function makePeople(deps: Deps): Promise<Cast> {
   const repository = deps.db.getRepository(PersonEntity);
   const passwordHash = await hashPassword(demoPeople()[0]?.password ?? 'cut once measure twice');
@@ -121,7 +128,7 @@ async function upload<T>(
   }
 }
 
-async function media(deps: Deps, person: PersonEntity, key: string, captions: Cue[]) {
+async function media(deps: Deps, person: PersonEntity, key: string, captions: Spoken[]) {
   const has = (name: string) => existsSync(join(assets, name));
   const clip = has(`${key}.mp4`)
     ? await upload(`${key}.mp4`, null, (f) => keepClip(deps, person, f))
@@ -129,7 +136,11 @@ async function media(deps: Deps, person: PersonEntity, key: string, captions: Cu
   const cover = has(`${key}.webp`)
     ? await upload(`${key}.webp`, null, (f) => keepPhoto(deps, person, f))
     : null;
-  const vtt = await upload(`${key}.vtt`, toVtt(captions), (f) => keepCaptions(deps, person, f));
+  const vtt = await upload(
+    `${key}.vtt`,
+    toVtt(captions.map((cue) => ({ ...cue, words: [] }))),
+    (f) => keepCaptions(deps, person, f),
+  );
   return { clip, cover, vtt };
 }
 

@@ -7,10 +7,16 @@ export type Upgrade = (document: Record<string, unknown>) => Record<string, unkn
 export const upgrades: Readonly<Record<number, Upgrade>> = {};
 
 /** A stored document as today's shape, upgraded on reading. Throws when it is newer than this program. */
-export function readDocument(stored: unknown, chain: Readonly<Record<number, Upgrade>> = upgrades): PlanDocument {
+export function readDocument(
+  stored: unknown,
+  chain: Readonly<Record<number, Upgrade>> = upgrades,
+): PlanDocument {
   let document = stored as Record<string, unknown>;
   let version = Number(document.scantling);
-  if (!(version <= documentVersion)) throw new Error(`This plan is of version ${String(document.scantling)}; this program reads up to ${documentVersion}.`);
+  if (!(version <= documentVersion))
+    throw new Error(
+      `This plan is of version ${String(document.scantling)}; this program reads up to ${documentVersion}.`,
+    );
   while (version < documentVersion) {
     const upgrade = chain[version];
     if (!upgrade) throw new Error(`There is no way from version ${version}.`);

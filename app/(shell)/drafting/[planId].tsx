@@ -1,0 +1,1 @@
+export { DraftScreen as default } from '../../../components/drafting/draft-screen';

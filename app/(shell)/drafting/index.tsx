@@ -1,0 +1,1 @@
+export { DraftingScreen as default } from '../../../components/drafting/drafting-screen';

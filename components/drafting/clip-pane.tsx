@@ -1,0 +1,183 @@
+import { useState } from 'react';
+import { v7 as uuid } from 'uuid';
+import { uploadCaptions, uploadClip } from '../../shared/api/media';
+import { limits } from '../../shared/api/limits';
+import { jot, readCaptions, toDraft } from '../../shared/captions';
+import { Rational } from '../../shared/measure';
+import { stepSchema, type PlanDocument } from '../../shared/plan/document';
+import { upload } from '../data/api-client';
+import { tell } from '../data/problems';
+import { ClipPlayer } from '../plans/clip-player';
+import { Banner } from '../ui/banner';
+import { Button } from '../ui/button';
+import { FilePick } from '../ui/file-pick';
+import { Heading } from '../ui/heading';
+import { Row, Section, Stack } from '../ui/layout';
+import { Progress } from '../ui/progress';
+import { Text } from '../ui/text';
+import { TextField } from '../ui/text-field';
+import { type DraftEditor } from './use-draft-editor';
+
+const perUnit: Record<string, Rational> = {
+  in: Rational.of(127, 5),
+  mm: Rational.of(1),
+  ft: Rational.of(1524, 5),
+};
+
+/** Timed steps from a caption file, with what was heard in each. */
+export function stepsFromCaptions(text: string): PlanDocument['steps'] {
+  const jottings = jot(readCaptions(text));
+  return toDraft(jottings)
+    .filter((step) => step.phase === 'build' || step.phase === 'demo')
+    .map((step) =>
+      stepSchema.parse({
+        id: uuid(),
+        title: step.title.slice(0, limits.title),
+        phase: step.phase === 'demo' ? 'demo' : 'build',
+        stretches: [{ start: step.start, end: step.end }],
+        cautions: step.cautions.map((c) => ({ id: uuid(), text: c.text, at: c.t })),
+        heard: step.measures.flatMap((m) => {
+          const unit = perUnit[m.unit];
+          if (m.value === null || !unit) return [];
+          const value = {
+            text: `${m.value} ${m.unit}`,
+            mm: Rational.fromNumber(m.value).times(unit).toString(),
+          };
+          return [{ id: uuid(), at: m.t, words: m.text.slice(0, 300), unit: m.unit, value }];
+        }),
+      }),
+    );
+}
+
+/** The clip and its captions: brought, watched, turned into steps. */
+export function ClipPane({ editor: { document, change } }: { editor: DraftEditor }) {
+  const [progress, setProgress] = useState<number | null>(null);
+  const [trouble, setTrouble] = useState<string | null>(null);
+  const [found, setFound] = useState<string | null>(null);
+  const { clip } = document;
+  const bringClip = async (file: File | undefined) => {
+    if (!file) return;
+    setTrouble(null);
+    setProgress(0);
+    try {
+      const { media } = await upload(uploadClip, file, {
+        onProgress: (sent, total) => setProgress(sent / total),
+      });
+      const captions = clip.source === 'none' ? undefined : clip.captions;
+      change((d) => ({
+        ...d,
+        clip: {
+          source: 'upload',
+          media: media.hash,
+          duration: media.duration ?? 3600,
+          ...(captions ? { captions } : {}),
+        },
+      }));
+    } catch (error) {
+      setTrouble(tell(error).text);
+    } finally {
+      setProgress(null);
+    }
+  };
+  const bringCaptions = async (file: File | undefined) => {
+    if (!file) return;
+    setTrouble(null);
+    try {
+      const text = await file.text();
+      const { media } = await upload(uploadCaptions, file);
+      const steps = stepsFromCaptions(text);
+      change((d) => ({
+        ...d,
+        clip: d.clip.source === 'none' ? d.clip : { ...d.clip, captions: media.hash },
+        steps: d.steps.length > 0 ? d.steps : steps,
+      }));
+      const heard = steps.reduce((n, s) => n + s.heard.length, 0);
+      setFound(
+        document.steps.length > 0
+          ? 'The captions are kept. Your steps stay as they are.'
+          : `${steps.length} steps and ${heard} figures were jotted down. Look through them.`,
+      );
+    } catch (error) {
+      setTrouble(tell(error).text);
+    }
+  };
+  return (
+    <Section>
+      <Heading level={2}>Clip</Heading>
+      {trouble ? <Banner kind="fails">{trouble}</Banner> : null}
+      {found ? (
+        <Banner kind="holds" announce>
+          {found}
+        </Banner>
+      ) : null}
+      {clip.source === 'none' ? (
+        <Text tone="ink2">Bring a clip, or the address of a video hosted elsewhere.</Text>
+      ) : (
+        <ClipPlayer clip={clip} label="Clip of the draft" />
+      )}
+      {progress === null ? null : (
+        <Progress label={`Uploading, ${Math.round(progress * 100)} per cent`} value={progress} />
+      )}
+      <Row gap={16} wrap align="flex-start">
+        <FilePick
+          label="Clip file"
+          accept="video/*"
+          maxBytes={limits.clipBytes}
+          onFiles={(files) => void bringClip(files[0])}
+        />
+        <FilePick
+          label="Caption file"
+          accept=".vtt,.srt,text/vtt"
+          maxBytes={limits.captionBytes}
+          onFiles={(files) => void bringCaptions(files[0])}
+        />
+      </Row>
+      {clip.source === 'upload' ? null : <Hosted editor={{ document, change }} />}
+    </Section>
+  );
+}
+
+function Hosted({
+  editor: { document, change },
+}: {
+  editor: Pick<DraftEditor, 'document' | 'change'>;
+}) {
+  const known = document.clip.source === 'hosted' ? document.clip : null;
+  const [url, setUrl] = useState(known?.url ?? '');
+  const [length, setLength] = useState(known ? String(Math.round(known.duration / 60)) : '');
+  const [fault, setFault] = useState<string | undefined>();
+  const keep = () => {
+    const minutes = Number(length);
+    const bad = !/^https?:\/\/\S+\.\S+/.test(url)
+      ? 'An address begins with https://'
+      : !(minutes > 0)
+        ? 'Say how many minutes it lasts.'
+        : undefined;
+    setFault(bad);
+    if (!bad)
+      change((d) => ({
+        ...d,
+        clip: { source: 'hosted', url, duration: minutes * 60, claimed: false },
+      }));
+  };
+  return (
+    <Stack gap={12}>
+      <TextField
+        label="Or the address of a hosted video"
+        type="url"
+        value={url}
+        onChange={setUrl}
+        error={fault}
+      />
+      <TextField
+        label="It lasts, minutes"
+        inputMode="numeric"
+        value={length}
+        onChange={setLength}
+      />
+      <Row>
+        <Button label="Use the hosted video" onPress={keep} />
+      </Row>
+    </Stack>
+  );
+}

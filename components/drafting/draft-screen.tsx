@@ -1,0 +1,182 @@
+import { useLocalSearchParams } from 'expo-router';
+import { useEffect, useState } from 'react';
+import { type Draft } from '../../shared/api/plans';
+import { SignedIn } from '../account/signed-in';
+import { readLocal, dropLocal } from '../data/kept-draft';
+import { ApiProblem, tell } from '../data/problems';
+import { PageHead } from '../shell/page-head';
+import { Banner } from '../ui/banner';
+import { Dialog } from '../ui/dialog';
+import { Page } from '../ui/layout';
+import { ErrorState, LoadingLines } from '../ui/states';
+import { TabPanel, Tabs } from '../ui/tabs';
+import { Text } from '../ui/text';
+import { useMounted } from '../ui/use-media';
+import { AboutPane } from './about-pane';
+import { ClipPane } from './clip-pane';
+import { useDraft } from './drafting-queries';
+import {
+  dimensionFields,
+  hardwareFields,
+  linkFields,
+  partFields,
+  stockFields,
+  toolFields,
+} from './list-fields';
+import { ListEditor } from './list-editor';
+import { PublishPane } from './publish-pane';
+import { StepsPane } from './steps-pane';
+import { useDraftEditor, type DraftEditor, type Kept } from './use-draft-editor';
+
+/** The drafting of one plan. */
+export function DraftScreen() {
+  const { planId } = useLocalSearchParams<{ planId: string }>();
+  const mounted = useMounted();
+  if (!mounted) return <Loading />;
+  return (
+    <SignedIn title="Draft" what="Makers work on their plans here.">
+      {() => <Loaded planId={planId} />}
+    </SignedIn>
+  );
+}
+
+function Loading() {
+  return (
+    <>
+      <PageHead title="Draft" back="/drafting" />
+      <Page>
+        <LoadingLines label="Loading the draft" />
+      </Page>
+    </>
+  );
+}
+
+function Loaded({ planId }: { planId: string }) {
+  const draft = useDraft(planId);
+  if (draft.data && !draft.isFetching)
+    return (
+      <Editing
+        key={`${draft.data.id}-${draft.data.state}-${draft.data.revisions.length}`}
+        draft={draft.data}
+      />
+    );
+  if (!draft.isError) return <Loading />;
+  const gone = draft.error instanceof ApiProblem && draft.error.status < 500;
+  return (
+    <>
+      <PageHead title="Draft" back="/drafting" />
+      <Page>
+        <ErrorState
+          title={gone ? 'This draft is not here' : 'The draft did not come'}
+          happened={tell(draft.error).text}
+          code={tell(draft.error).code}
+          onRetry={() => void draft.refetch()}
+        />
+      </Page>
+    </>
+  );
+}
+
+const tabs = [
+  { value: 'steps', label: 'Clip and steps' },
+  { value: 'dimensions', label: 'Dimensions' },
+  { value: 'parts', label: 'Parts and stock' },
+  { value: 'tools', label: 'Tools and links' },
+  { value: 'about', label: 'About' },
+  { value: 'publish', label: 'Publish' },
+] as const;
+type Tab = (typeof tabs)[number]['value'];
+
+/** How things stand with keeping, in a line. */
+export function keptWords(kept: Kept): string {
+  if (kept.state === 'kept')
+    return kept.at
+      ? `Kept ${kept.at.toLocaleTimeString(undefined, { hour: '2-digit', minute: '2-digit' })}`
+      : 'Kept';
+  if (kept.state === 'no-signal') return 'No signal. Kept in this browser';
+  if (kept.state === 'refused') return 'Not taken; kept in this browser';
+  if (kept.state === 'stale') return 'Another window saved first';
+  return 'Keeping';
+}
+
+function Editing({ draft }: { draft: Draft }) {
+  const editor = useDraftEditor(draft);
+  const { document, change, kept } = editor;
+  const [tab, setTab] = useState<Tab>('steps');
+  useRestore(draft, editor);
+  const list = <K extends 'dimensions' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links'>(
+    key: K,
+  ) => ({
+    items: document[key],
+    onChange: (items: (typeof document)[K]) => change((d) => ({ ...d, [key]: items })),
+  });
+  return (
+    <>
+      <PageHead title={document.title || 'Untitled'} back="/drafting" sub={keptWords(kept)} />
+      <Page width="full">
+        {kept.state === 'refused' ? <Banner kind="fails">{kept.text}</Banner> : null}
+        <Tabs
+          label="Parts of the draft"
+          tabs={tabs}
+          value={tab}
+          onChange={setTab}
+          id="draft"
+          fill={false}
+        />
+        <TabPanel id="draft" value={tab}>
+          {tab === 'steps' ? (
+            <>
+              <ClipPane editor={editor} />
+              <StepsPane editor={editor} />
+            </>
+          ) : null}
+          {tab === 'dimensions' ? (
+            <ListEditor
+              title="Dimensions"
+              fields={dimensionFields(document)}
+              {...list('dimensions')}
+            />
+          ) : null}
+          {tab === 'parts' ? (
+            <>
+              <ListEditor title="Parts" fields={partFields(document)} {...list('parts')} />
+              <ListEditor title="Stock" fields={stockFields(document)} {...list('stock')} />
+              <ListEditor title="Hardware" fields={hardwareFields} {...list('hardware')} />
+            </>
+          ) : null}
+          {tab === 'tools' ? (
+            <>
+              <ListEditor title="Tools" fields={toolFields} {...list('tools')} />
+              <ListEditor title="Links" fields={linkFields} {...list('links')} />
+            </>
+          ) : null}
+          {tab === 'about' ? <AboutPane editor={editor} /> : null}
+          {tab === 'publish' ? <PublishPane draft={draft} editor={editor} /> : null}
+        </TabPanel>
+      </Page>
+      <Dialog
+        open={kept.state === 'stale'}
+        title="Another window saved this plan first. Which one goes on?"
+        onClose={() => editor.choose('other')}
+        keep="Take the other"
+        action={{ label: 'Keep mine', onPress: () => editor.choose('mine') }}
+      >
+        <Text>
+          What you have here is kept in this browser until you choose. Keeping yours puts it over
+          the other.
+        </Text>
+      </Dialog>
+    </>
+  );
+}
+
+/** What a closed tab left unsaved is taken up again. */
+function useRestore(draft: Draft, { change }: DraftEditor) {
+  useEffect(() => {
+    void readLocal(draft.id).then((local) => {
+      if (!local) return;
+      if (JSON.stringify(local) === JSON.stringify(draft.document)) void dropLocal(draft.id);
+      else change(() => local);
+    });
+  }, [draft, change]);
+}

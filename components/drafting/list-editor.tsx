@@ -1,0 +1,137 @@
+import { useState } from 'react';
+import { View } from 'react-native';
+import { v7 as uuid } from 'uuid';
+import { Button } from '../ui/button';
+import { Checkbox } from '../ui/checkbox';
+import { Heading } from '../ui/heading';
+import { Row, Rule, Section, Stack } from '../ui/layout';
+import { Select } from '../ui/select';
+import { Text } from '../ui/text';
+import { TextField } from '../ui/text-field';
+
+/** One field of a row: how it is read from the element, put back, and judged. */
+export interface ListField<T> {
+  key: string;
+  label: string;
+  get: (item: T) => string;
+  set: (item: T, text: string) => T;
+  options?: readonly { value: string; label: string }[];
+  /** What is wrong with the text, in a sentence. */
+  fault?: (text: string, item: T) => string | undefined;
+  flag?: boolean;
+  mono?: boolean;
+}
+
+export interface ListFields<T> {
+  /** A new element. */
+  make: (id: string, count: number) => T;
+  /** Its line while it is closed. */
+  name: (item: T) => string;
+  fields: readonly ListField<T>[];
+}
+
+export interface ListEditorProps<T extends { id: string }> {
+  title: string;
+  fields: ListFields<T>;
+  items: readonly T[];
+  onChange: (items: T[]) => void;
+}
+
+/** A list of a plan: lines that open into their fields. */
+export function ListEditor<T extends { id: string }>({
+  title,
+  fields,
+  items,
+  onChange,
+}: ListEditorProps<T>) {
+  const [open, setOpen] = useState<string | null>(null);
+  const replace = (next: T) => onChange(items.map((item) => (item.id === next.id ? next : item)));
+  const add = () => {
+    const item = fields.make(uuid(), items.length);
+    onChange([...items, item]);
+    setOpen(item.id);
+  };
+  return (
+    <Section>
+      <Heading level={2} note={String(items.length)}>
+        {title}
+      </Heading>
+      <View role="list" aria-label={title}>
+        {items.map((item) => (
+          <View key={item.id} role="listitem">
+            <Stack gap={12} style={{ paddingVertical: 8 }}>
+              <Row justify="space-between" gap={12}>
+                <Text style={{ flex: 1 }}>{fields.name(item) || 'new'}</Text>
+                <Button
+                  size="small"
+                  label={
+                    open === item.id
+                      ? `Close ${fields.name(item) || 'it'}`
+                      : `Open ${fields.name(item) || 'it'}`
+                  }
+                  expanded={open === item.id}
+                  onPress={() => setOpen(open === item.id ? null : item.id)}
+                >
+                  {open === item.id ? 'Close' : 'Open'}
+                </Button>
+              </Row>
+              {open === item.id ? (
+                <Stack gap={12}>
+                  {fields.fields.map((field) => (
+                    <OneField key={field.key} field={field} item={item} onChange={replace} />
+                  ))}
+                  <Row>
+                    <Button
+                      kind="danger"
+                      size="small"
+                      label={`Take out ${fields.name(item) || 'it'}`}
+                      onPress={() => onChange(items.filter((x) => x.id !== item.id))}
+                    >
+                      Take out
+                    </Button>
+                  </Row>
+                </Stack>
+              ) : null}
+            </Stack>
+            <Rule />
+          </View>
+        ))}
+      </View>
+      <Row>
+        <Button icon="add" label={`Add to ${title.toLowerCase()}`} onPress={add} />
+      </Row>
+    </Section>
+  );
+}
+
+function OneField<T>({
+  field,
+  item,
+  onChange,
+}: {
+  field: ListField<T>;
+  item: T;
+  onChange: (item: T) => void;
+}) {
+  const value = field.get(item);
+  const put = (text: string) => onChange(field.set(item, text));
+  if (field.flag)
+    return (
+      <Checkbox
+        label={field.label}
+        value={value === 'yes'}
+        onChange={(on) => put(on ? 'yes' : 'no')}
+      />
+    );
+  if (field.options)
+    return <Select label={field.label} options={field.options} value={value} onChange={put} />;
+  return (
+    <TextField
+      label={field.label}
+      value={value}
+      onChange={put}
+      error={field.fault?.(value, item)}
+      mono={field.mono}
+    />
+  );
+}

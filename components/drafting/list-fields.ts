@@ -1,0 +1,251 @@
+import { parseExpression, parseLength } from '../../shared/measure';
+import {
+  disclosures,
+  grains,
+  hardwareSchema,
+  instruments,
+  linkSchema,
+  machineClasses,
+  origins,
+  partSchema,
+  senses,
+  stockSchema,
+  symbolPattern,
+  toolSchema,
+  dimensionSchema,
+  type Dimension,
+  type Hardware,
+  type Part,
+  type PlanDocument,
+  type PlanLink,
+  type Stock,
+  type Tool,
+} from '../../shared/plan/document';
+import { nextLetter } from '../../shared/plan/facts';
+import { type ListField, type ListFields } from './list-editor';
+
+const options = (values: readonly string[]) =>
+  values.map((value) => ({ value, label: value.replace(/-/g, ' ') }));
+
+/** A text field of an element. */
+function text<T, K extends keyof T & string>(
+  key: K,
+  label: string,
+  more: Partial<ListField<T>> = {},
+): ListField<T> {
+  return {
+    key,
+    label,
+    get: (item) => String(item[key] ?? ''),
+    set: (item, value) => ({ ...item, [key]: value }),
+    ...more,
+  };
+}
+const choice = <T, K extends keyof T & string>(key: K, label: string, values: readonly string[]) =>
+  text<T, K>(key, label, { options: options(values) });
+const whole = <T, K extends keyof T & string>(key: K, label: string) =>
+  text<T, K>(key, label, {
+    set: (item, value) => ({ ...item, [key]: Math.max(1, Math.round(Number(value)) || 1) }),
+  });
+
+/** A figure alone takes the plan's unit; anything else is an expression. */
+const expressionFault = (document: PlanDocument) => (value: string) => {
+  if (value.trim() === '') return 'Give a figure or an expression.';
+  const figure = parseLength(value, { unit: document.units });
+  if (figure.ok) return undefined;
+  if (/^[\d\s./'"-]+(?:mm|in|ft|cm|m)?$/.test(value))
+    return `Column ${figure.at + 1}: ${figure.message} ${figure.cure ?? ''}`.trim();
+  const parsed = parseExpression(value);
+  return parsed.ok
+    ? undefined
+    : `Column ${parsed.fault.at + 1}: ${parsed.fault.message} ${parsed.fault.cure ?? ''}`.trim();
+};
+const optionalFault = (document: PlanDocument) => (value: string) =>
+  value.trim() === '' ? undefined : expressionFault(document)(value);
+
+export const dimensionFields = (document: PlanDocument): ListFields<Dimension> => ({
+  make: (id, n) =>
+    dimensionSchema.parse({
+      id,
+      name: `Dimension ${n + 1}`,
+      symbol: `d${n + 1}`,
+      origin: 'given',
+      expression: '',
+    }),
+  name: (d) => `${d.symbol} = ${d.expression}`,
+  fields: [
+    text('name', 'Name'),
+    text('symbol', 'Symbol', {
+      mono: true,
+      fault: (v) =>
+        symbolPattern.test(v) ? undefined : 'A letter first, then letters, digits and _.',
+    }),
+    choice('origin', 'Origin', origins),
+    text('expression', 'Value or expression', { mono: true, fault: expressionFault(document) }),
+    {
+      key: 'tolerance',
+      label: 'Tolerance ±',
+      mono: true,
+      fault: optionalFault(document),
+      get: (d) => (d.tolerance.form === 'plus-minus' ? d.tolerance.by : ''),
+      set: (d, by) => ({
+        ...d,
+        tolerance: by.trim() === '' ? { form: 'none' } : { form: 'plus-minus', by },
+      }),
+    },
+    choice('sense', 'Sense', senses),
+    choice('instrument', 'Measured with', instruments),
+    text('where', 'Where and how to measure'),
+  ],
+});
+
+const stockChoices = (document: PlanDocument) => [
+  { value: 'none', label: 'not said' },
+  ...document.stock.map((s) => ({ value: s.id, label: s.name })),
+];
+
+export const partFields = (document: PlanDocument): ListFields<Part> => ({
+  make: (id) =>
+    partSchema.parse({
+      id,
+      mark: nextLetter(document.parts[document.parts.length - 1]?.mark ?? null),
+      name: '',
+      length: '',
+      width: '',
+    }),
+  name: (p) => `${p.mark} ${p.name}`,
+  fields: [
+    text('mark', 'Mark'),
+    text('name', 'Name'),
+    whole('quantity', 'How many'),
+    text('length', 'Length', { mono: true, fault: expressionFault(document) }),
+    text('width', 'Width', { mono: true, fault: expressionFault(document) }),
+    text('thickness', 'Thickness, if not the stock’s', {
+      mono: true,
+      fault: optionalFault(document),
+    }),
+    {
+      key: 'stock',
+      label: 'Cut from',
+      options: stockChoices(document),
+      get: (p) => p.stockId ?? 'none',
+      set: (p, v) => ({ ...p, stockId: v === 'none' ? undefined : v }),
+    },
+    choice('grain', 'Grain', grains),
+    choice('role', 'Role', ['part', 'spare', 'test-piece', 'helper']),
+  ],
+});
+
+export const stockFields = (document: PlanDocument): ListFields<Stock> => ({
+  make: (id) => stockSchema.parse({ id, name: '', form: 'sheet', thickness: '' }),
+  name: (s) => s.name,
+  fields: [
+    text('name', 'Name'),
+    choice('form', 'Form', ['sheet', 'board', 'strip', 'rod']),
+    text('material', 'Material'),
+    text('thickness', 'Actual thickness', { mono: true, fault: expressionFault(document) }),
+    {
+      key: 'length',
+      label: 'Length on sale',
+      mono: true,
+      fault: optionalFault(document),
+      get: (s) => s.sizes[0]?.length ?? '',
+      set: (s, length) => ({
+        ...s,
+        sizes: [
+          {
+            id: s.sizes[0]?.id ?? s.id,
+            width: s.sizes[0]?.width ?? '',
+            price: s.sizes[0]?.price,
+            length,
+          },
+        ],
+      }),
+    },
+    {
+      key: 'width',
+      label: 'Width on sale',
+      mono: true,
+      fault: optionalFault(document),
+      get: (s) => s.sizes[0]?.width ?? '',
+      set: (s, width) => ({
+        ...s,
+        sizes: [
+          {
+            id: s.sizes[0]?.id ?? s.id,
+            length: s.sizes[0]?.length ?? '',
+            price: s.sizes[0]?.price,
+            width,
+          },
+        ],
+      }),
+    },
+    whole('quantity', 'How many'),
+  ],
+});
+
+export const hardwareFields: ListFields<Hardware> = {
+  make: (id) => hardwareSchema.parse({ id, kind: 'screw', name: '' }),
+  name: (h) => h.name,
+  fields: [
+    text('name', 'Name'),
+    choice('kind', 'Kind', [
+      'screw',
+      'bolt',
+      'brad',
+      'hinge',
+      'slide',
+      'castor',
+      'magnet',
+      'other',
+    ]),
+    whole('quantity', 'How many'),
+    text('note', 'Note'),
+  ],
+};
+
+export const toolFields: ListFields<Tool> = {
+  make: (id) => toolSchema.parse({ id, machine: 'hand-tool', name: '' }),
+  name: (t) => t.name,
+  fields: [
+    text('name', 'Name'),
+    choice('machine', 'Machine or hand tool', machineClasses),
+    {
+      key: 'needed',
+      label: 'Needed',
+      flag: true,
+      get: (t) => (t.needed ? 'yes' : 'no'),
+      set: (t, v) => ({ ...t, needed: v === 'yes' }),
+    },
+    text('instead', 'Instead you can'),
+  ],
+};
+
+export const linkFields: ListFields<PlanLink> = {
+  make: (id) => linkSchema.parse({ id, title: '', url: 'https://example.org/' }),
+  name: (l) => l.title,
+  fields: [
+    text('title', 'Title'),
+    text('url', 'Address', {
+      fault: (v) =>
+        /^https?:\/\/\S+\.\S+/.test(v) ? undefined : 'An address begins with https://',
+    }),
+    {
+      key: 'onSale',
+      label: 'Leads to something on sale',
+      flag: true,
+      get: (l) => (l.onSale ? 'yes' : 'no'),
+      set: (l, v) => ({ ...l, onSale: v === 'yes' }),
+    },
+    {
+      key: 'disclosure',
+      label: 'What it earns you',
+      options: [{ value: 'unsaid', label: 'not said yet' }, ...options(disclosures)],
+      get: (l) => l.disclosure ?? 'unsaid',
+      set: (l, v) => ({
+        ...l,
+        disclosure: v === 'unsaid' ? undefined : (v as PlanLink['disclosure']),
+      }),
+    },
+  ],
+};
