@@ -32,65 +32,63 @@ more tease, more tees, morris, more tis, mortis, more this > mortise | tenon ten
 mortar's, mortars > mortises | tenon tenons joint chisel |
 in grain, and grain, engrain > end grain | look glue wood plane glass soak smooth sand cut board seal absorb glassy shooting pass | ingrained
 living knife, driving knife, giving knife, arriving knife, raving knife > riving knife | * |
-father board, father boards, further board > feather board, feather boards | * |
+father board, father boards, further board > feather board, feather boards, feather boards | * |
 fetter board, weather board, leather board > feather board | saw table fence router pressure push | roof siding cladding house
 counter sync, counter sing, counter sink, countersync, counter sank, counter think, counter zinc > countersink | DRILL heads head bit | kitchen sink
 chamber, camper, champ fur, champer, jam for, shamfer, champfer > chamfer | edge edges bottom bit router plane corner corners degree forty block along underside lead | van bed gun heart echo camping torture
 chambers, campers > chamfers | edge edges bottom bit router plane corner corners |
 chambered, campered > chamfered | edge edges bottom bit router plane corner corners |
-towel, towels, dowl, dowels > dowel, dowels, dowel, dowels | drill hole holes glue inch diameter drops pin pins peg rod joint | paper bath dry wipe hands kitchen wet
+towel, towels, dowl > dowel, dowels, dowel | drill hole holes glue inch diameter drops pin pins peg rod joint | paper bath dry wipe hands kitchen wet
 shell lack, shell act, shell ac, shellack, shell ack, sheila, shall act > shellac | FINISH |
 polly, paulie > poly | coat coats finish brush wipe dry satin | parrot
 in a corner clamp > corner clamp | GLUE |
 call, calls, called, callus > caul, cauls, caul, caul | clamp clamps clamping pressure spreads joint curved panel waxed flat @ | phone it them me him that this name video so
-curve, curf, curb, cursive, serve > kerf, kerf, kerf, kerf, kerf | saw blade wedge rip pinch close width table | radius template curved draw arc bend bent band street road dinner
+curve, curf, curb > kerf | saw blade wedge rip pinch close width table | radius template curved draw arc bend bent band street road dinner
 meter saw, might or saw, mighter saw, mitre soar, motor saw > miter saw | * |
-mighters, mitres', miders, my tours > miters | * |
-meter, motor, mighty, mider > miter, miter, miter, miter | +gauge +joint +joints +slot +box +cut +square +fence +sled | tall long parking metres
+mighters, miders, my tours > miters | * |
+meter, mighty, mider > miter | +gauge +joint +joints +slot +box +cut +square +fence +sled | tall long parking metres
 plunge rotor, rotor > plunge router, router | plunge trim bit table cut groove slot template base edge collet straight | brake car helicopter wheel
-rooter, rudder, rotter > router | bit table cut groove slot template edge collet straight plunge | boat ship
-rowdy, rabid > rabbet, rabbet | router groove panel edge deep wide |
+rooter, rotter > router | bit table cut groove slot template edge collet straight plunge | boat ship
+rowdy, rabid > rabbet | router groove panel edge deep wide |
 fly wood, ply would, plywould, fly would, apply wood, ply woods, flywood > plywood | * |
 empty f, mdf's, m d f, mtf, mds, empty have, mbf > mdf | * |
 baltic church, baltic perch, baltic burch, ball tick birch > baltic birch | * |
 church > birch | plywood ply sheet veneer baltic mil wood | sunday pew priest pray
 birds eye, birch ice > bird's eye | maple figure figured |
-hint, hints > hinge, hinges | piano door doors screw screws leaf pin butt barrel lid mortise swing knuckle | give take tips clue clues
+hint > hinge | piano door doors screw screws leaf pin butt barrel lid mortise swing knuckle | give take tips clue clues
 hindge, henge, hinch > hinge | door doors screw lid leaf pin box |
-brisket, brisk it, briskets, biscotti > biscuit, biscuit, biscuits, biscuit | joint joints corner corners number slot slots glue jointer cutter edge panel alignment | smoke smoked meat bbq eat beef coffee oven dinner
-chalk, chock, chuk > chuck, chuck, chuck | drill bit driver speed jaws press lathe tighten key clutch shank spin | line board white blackboard wheel wheels mark dust calk
+brisket, brisk it, briskets > biscuit, biscuit, biscuits | joint joints corner corners number slot slots glue jointer cutter edge panel alignment | smoke smoked meat bbq eat beef coffee oven dinner
+chalk, chock, chuk > chuck | drill bit driver speed jaws press lathe tighten key clutch shank spin | line board white blackboard wheel wheels mark dust calk
 french clean, french clear, french clique, french creek, french kleet, friend cleat, french cleet, french please > french cleat | * |
-clean, kleet, cleet, cleats > cleat, cleat, cleat, cleats | french wall hang hook screw strip bevel | wipe up up dust cloth nice surface
-bezel, bevil, basil, bevels, bubble > bevel, bevel, bevel, bevels, bevel | angle square tilt degree degrees saw blade chisel edge gauge grind sharpen sliding | watch screen phone herbs pasta level
-bird, birds, burrs, brrr > burr, burrs, burrs, burr | edge edges scraper metal file steel deburr hook feel stone iron back drill drilled knife | house feeder nest sing box table sky
-call it, collett, collect, colette, call at, caulet, collets > collet, collet, collet, collet, collet, collet, collets | router bit chuck rod shank tighten spindle wrench pointed nut quarter | phone name day done good
-travel, trample, tremble, trammels, trauma > trammel, trammel, trammel, trammels, trammel | circle circles arm pivot pin radius router arc swings swing beam | trip plane car holiday abroad distance
+kleet, cleet > cleat | french wall hang hook screw strip bevel | wipe up up dust cloth nice surface
+bezel, bevil > bevel | angle square tilt degree degrees saw blade chisel edge gauge grind sharpen sliding | watch screen phone herbs pasta level
+bird, birds, brrr > burr, burrs, burr | edge edges scraper metal file steel deburr hook feel stone iron back drill drilled knife | house feeder nest sing box table sky
+call it, collett, caulet > collet | router bit chuck rod shank tighten spindle wrench pointed nut quarter | phone name day done good
+travel, trample > trammel | circle circles arm pivot pin radius router arc swings swing beam | trip plane car holiday abroad distance
 fennel lick, phonetic, fanatic, phonolic, finolic, fennelic, final lick > phenolic | sheet plate base router insert thick drill tape quarter top | alphabet music
 a pox e, a poxy, epoxies, pox e, a pock see, e poxy > epoxy | * |
-rhema, reamers, rema, reemer, dreamer, steamer > reamer, reamers, reamer, reamer, reamer, reamer | hole holes drill pin undersize press tapered size ream through bore | bend bending steam box sleep night
-gym, gyms, chim, shem, shin > shim, shims, shim, shim, shim | slide loosen thick thin paper card cards tape under level gap wedge screws behind fence | workout work membership exercise leg kick bruise
+rhema, rema, reemer > reamer | hole holes drill pin undersize press tapered size ream through bore | bend bending steam box sleep night
+gym, chim, shem > shim | slide loosen thick thin paper card cards tape under level gap wedge screws behind fence | workout work membership exercise leg kick bruise
 for center, four center, foreigner, forester, firster, foster, four stinger, forced near > forstner | bit bits hole drill diameter inch counterbore |
 court are, cross cut sled > crosscut sled | * |
 cross cat, across cut > crosscut | saw sled blade fence |
 joiner plane, joint or > jointer plane, jointer | flatten face edge square board planer |
 plainer, plane her, planar > planer | board thickness pass passes jointer surface through stock feed |
-style, styles > stile, stiles | rail rails door doors frame panel cope groove tenon | hair music fashion old modern similar free your
+styles > stiles | rail rails door doors frame panel cope groove tenon | hair music fashion old modern similar free your
 rails and styles > rails and stiles | * |
 card kiss, carcase, car case, carcus, car kiss > carcass | cabinet side sides panel back shelf ply top bottom glue door doors box |
 drawer slights, draw slides, drawer sliced > drawer slides | * |
 draw, draws > drawer, drawers | slides slide runner runners bottom fronts front box boxes pull dovetail dovetails cabinet chest | pencil line lines sketch circle arc out picture
 sprue, spruced > spruce | board timber framing lumber |
 seizing, sap ely, sepele > sapele | board wood veneer mahogany |
-poplar, popular > poplar | board boards wood paint painted lumber drawer cheap secondary sides rough sawn | very video most music opinion
 lumbar > lumber | board boards wood yard rack pile stack saw rip construction rough | support back pain spine chair
 sea clamp, see clamp, seek lamp > c clamp | * |
 bar clamped, parallel clamped > bar clamps | panel |
-wise, vices, vise's > vise, vices, vise | bench jaw jaws clamp held hold block file | words old man advice
-device, advice > vise, vise | bench jaws jaw held clamped tighten block | phone electronic gave
-mallard, mallets > mallet, mallets | chisel tap hit knock drive pound | duck pond
-chistle, chisel's, chizel, jizzle > chisel | sharp mallet mortise pare chop edge |
+vise's > vise | bench jaw jaws clamp held hold block file | words old man advice
+mallard > mallet | chisel tap hit knock drive pound | duck pond
+chistle, chizel, jizzle > chisel | sharp mallet mortise pare chop edge |
 spoke shave, smoke shave, spook shave, spokes shave > spokeshave | * |
-draw knife, drawn knife > drawknife | shave bark horse curve wood |
+draw knife > drawknife | shave bark horse curve wood |
 dove tail, dove tales, dub tail, dove tale > dovetail, dovetails, dovetail, dovetail | JOINT WOOD saw drawer pins tails angle marker jig key |
 half blind does tails > half blind dovetails | * |
 sliding devil, sliding table bevel > sliding bevel | angle |
@@ -98,9 +96,8 @@ kickpack, kick bag, kick pack > kickback | saw blade table router |
 zero clear ants, zero clarence > zero clearance | insert throat plate saw table |
 push stic, bush stick, push sick > push stick | * |
 bush block, push black > push block | saw table jointer hand hands planer fingers |
-arbor, harbor, harbour > arbor, arbor, arbour | blade saw nut wrench shaft washer | garden boat ship port sea
-guys, gauze, gage, gouge > gauge, gauge, gauge, gauge | marking depth feeler angle mortise cutting line wheel scribe | turning lathe bowl everybody hey you what's bandage roughing spindle sharpen carve
-gorge, gauge, googe > gouge, gouge, gouge | LATHE carve carving roughing spindle bowl | river wire brads feeler marking depth screws eighteen
+gauze, gage, gouge > gauge | marking depth feeler angle mortise cutting line wheel scribe | turning lathe bowl everybody hey you what's bandage roughing spindle sharpen carve
+gorge, gauge, googe > gouge | LATHE carve carving roughing spindle bowl | river wire brads feeler marking depth screws eighteen
 head stock, heads stock > headstock | LATHE |
 tail stock, tales stock > tailstock | LATHE |
 face plate, facebook plate > faceplate | LATHE |
@@ -115,33 +112,33 @@ scroll so > scroll saw | * |
 track so, truck saw, tracks all > track saw | * |
 hack so, hex saw > hacksaw | * |
 chop so > chop saw | * |
-spline, splints, splint, splines > spline, splines, spline, splines | miter mitre corner corners key slot slots | doctor arm broken
+splints, splint > splines, spline | miter mitre corner corners key slot slots | doctor arm broken
 loose tendon, loose tenant > loose tenon | * |
-try square, tri square, dry square > try square | mark line check corner ninety blade stock pencil scribe |
-calibers, calibres, caliphers, calipers', callipers, caliber > calipers, calipers, calipers, calipers, calipers, calipers | measure measured thou thickness inch read reads reading jaws zero digital point diameter | gun bullet rifle
+tri square, dry square > try square | mark line check corner ninety blade stock pencil scribe |
+calibers, calibres, caliphers, caliber > calipers | measure measured thou thickness inch read reads reading jaws zero digital point diameter | gun bullet rifle
 my crowmeter, micro meter, mike rometer > micrometer | * |
-thou's, vow > thou, thou | two three four five six ten | wedding
+thou's, vow > thou | two three four five six ten | wedding
 straight head, straightage, straight age > straightedge | flat lay check gap along ruler |
-lie nails, brats, breads, bradz > brads, brads, brads, brads | gauge nailer nail nails glue shoot pin tack | kids children sausage eat toast
+lie nails, brats, breads, bradz > brads | gauge nailer nail nails glue shoot pin tack | kids children sausage eat toast
 laggs, legs bolts, lag bolds, lack bolts, lack screws, leg bolts > lags, lag bolts, lag bolts, lag bolts, lag screws, lag bolts | * |
 carriage bolds, cabbage bolts, carriage boats > carriage bolts | * |
 tea nut, tee nut, t net, teen nut, tea nuts > t nut, t nut, t nut, t nut, t nuts | bolt bolts thread threaded hammer hole drill knob | drink
 tea track, tee track, t trek > t track | * |
 threaded in search, threaded assert, threaded inset, threaded in certs > threaded insert | * |
-pastor, pastors, castle, castles, costers > caster, casters, caster, casters, casters | wheel wheels locking swivel plate roll rolling cart bolt bolts | church sand king
+pastor, pastors, costers > caster, casters, casters | wheel wheels locking swivel plate roll rolling cart bolt bolts | church sand king
 lineseed oil, linseed all, lindsey oil, lynn seed oil, linc seed oil > linseed oil | * |
 tongue oil, tung all, tongue all > tung oil | * |
 danish all, dennis oil > danish oil | * |
-laquer, lack her, lacquered, locker, liquor > lacquer, lacquer, lacquer, lacquer, lacquer | coat coats spray finish brush sand thinner dry film | gym school drink bottle bar key
-varnished, vanish > varnish, varnish | coat coats finish brush spar sand dry satin | disappear gone
+laquer, lack her, lacquered, locker > lacquer | coat coats spray finish brush sand thinner dry film | gym school drink bottle bar key
+varnished > varnish | coat coats finish brush spar sand dry satin | disappear gone
 paced wax, paste whacks, paste works, waist wax > paste wax | * |
 would glue, wood blue > wood glue | * |
 spring joint, sprung joined > sprung joint | GLUE |
-cup in, copying saw, coughing saw, coping soar > coping saw | * |
+copying saw, coughing saw, coping soar > coping saw | * |
 sand paper, sand pepper, san paper > sandpaper | * |
-grid, grits, great, grip, grid's > grit, grit, grit, grit, grit | sandpaper sand sanding sanded hundred eighty twenty forty paper sander scuff -80 -120 -150 -180 -220 -240 -320 -400 -twenty -eighty -forty -fifty | lines power graph idea job
+grid, grits > grit | sandpaper sand sanding sanded hundred eighty twenty forty paper sander scuff -80 -120 -150 -180 -220 -240 -320 -400 -twenty -eighty -forty -fifty | lines power graph idea job
 scribe lion, scribed lime > scribe line | * |
-joyce, joist's, choice, joyced, joists > joist, joist, joist, joist, joists | floor deck hanger beam framing hangers ceiling | your good personal best
+joyce, joist's > joist | floor deck hanger beam framing hangers ceiling | your good personal best
 studs finder, stud fighter > stud finder | wall |
 plum > plumb | level wall line post vertical check straight square | fruit jam tree tart wine
 level it's, spirit devil > spirit level | wall |
@@ -151,16 +148,15 @@ butt joined, but joint, bought joint > butt joint | * |
 box joined, fox joint > box joint | * |
 finger joined > finger joint | * |
 tongue and grove, tongue in groove, tonguing groove > tongue and groove | * |
-grove, groves, groups > groove, grooves, grooves | panel router cut deep wide tongue plough bottom drawer slot bit dado runs glue bead fold along | trees orange music band
-batten, baton, batons, batting > batten, batten, battens, batten | wall screw board doors strip roof ledge brace hang | relay police orchestra baseball cricket
-arris, heiress, paris > arris, arris, arris | edge edges plane soften sand sharp break corner | france
-strop's, stroppy, stropes > strop, strop, strop | leather sharpen edge blade compound honing | mood
-horning, owning > honing, honing | guide stone chisel edge sharpen angle bevel | horn house
+grove, groves > groove, grooves | panel router cut deep wide tongue plough bottom drawer slot bit dado runs glue bead fold along | trees orange music band
+baton, batons, batting > batten, battens, batten | wall screw board doors strip roof ledge brace hang | relay police orchestra baseball cricket
+heiress > arris | edge edges plane soften sand sharp break corner | france
+strop's, stroppy, stropes > strop | leather sharpen edge blade compound honing | mood
+horning, owning > honing | guide stone chisel edge sharpen angle bevel | horn house
 stop blog, stopped block, shop block > stop block | fence saw cut length miter clamp same |
-bench docks, bench dog, bench docs > bench dogs, bench dog, bench dogs | * |
+bench docks, bench docs > bench dogs | * |
 hold fast, hold vast > holdfast | bench hole mallet hammer |
-crotch grain, rift saw, rift sewn, quarter sewn, quarter sun, quarter song > crotch grain, rift sawn, rift sawn, quarter sawn, quarter sawn, quarter sawn | oak grain board boards wood |
-snipe, snap, snip > snipe, snipe, snipe | planer thicknesser board ends infeed outfeed |
-out feed, outfit, out feet > outfeed, outfeed, outfeed | table saw roller support planer | clothes wearing
-in feed, infield > infeed, infeed | table planer roller jointer support | baseball
+rift saw, rift sewn, quarter sewn, quarter sun, quarter song > rift sawn, rift sawn, quarter sawn, quarter sawn, quarter sawn | oak grain board boards wood |
+out feed, out feet > outfeed | table saw roller support planer | clothes wearing
+in feed > infeed | table planer roller jointer support | baseball
 `;
