@@ -38,6 +38,11 @@ module.exports = {
       displayName: 'server',
       testEnvironment: 'node',
       testMatch: ['<rootDir>/tests/api/**/*.test.ts'],
+      // Its exports know only `import`, which Jest's CommonJS does not ask for.
+      moduleNameMapper: {
+        '^file-type$': '<rootDir>/node_modules/file-type/index.js',
+        '^strtok3$': '<rootDir>/node_modules/strtok3/lib/index.js',
+      },
       transform: swc,
       transformIgnorePatterns,
     },

@@ -17,7 +17,7 @@ export function csrf(env: Env): RequestHandler {
     const here =
       origin === undefined ||
       origin === env.APP_ORIGIN ||
-      (host !== undefined && new URL(origin).host === host);
+      (host !== undefined && URL.canParse(origin) && new URL(origin).host === host);
     if (
       req.get('x-scantling') !== '1' ||
       !here ||

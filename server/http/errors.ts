@@ -77,6 +77,12 @@ function uniqueViolation(error: unknown): boolean {
   return driver?.code === '23505' || (error as { code?: string }).code === '23505';
 }
 
+/** A value PostgreSQL cannot read: a broken id (22P02) or a zero character (22021, 22P05). */
+function unreadableValue(error: unknown): boolean {
+  const driver = (error as { driverError?: { code?: string } }).driverError;
+  return ['22P02', '22021', '22P05'].includes(driver?.code ?? '');
+}
+
 interface BodyError {
   type?: string;
   status?: number;
@@ -90,6 +96,12 @@ export function toApiError(error: unknown): ApiError | null {
       'thing/exists',
       'Something with that name or id is there already. Nothing was changed.',
     );
+  if (unreadableValue(error)) {
+    return new ApiError(
+      'request/invalid',
+      'A value could not be stored as it is. Nothing was changed; take out unusual characters.',
+    );
+  }
   const body = error as BodyError;
   if (body.type === 'entity.too.large')
     return new ApiError(
@@ -98,7 +110,10 @@ export function toApiError(error: unknown): ApiError | null {
     );
   if (body.type === 'entity.parse.failed')
     return new ApiError('request/malformed', 'The body is not JSON. Nothing was changed.');
-  if (error instanceof URIError || (body.status === 400 && !body.type)) {
+  if (
+    error instanceof URIError ||
+    (typeof body.status === 'number' && body.status >= 400 && body.status < 500)
+  ) {
     return new ApiError(
       'request/malformed',
       'The address or the body could not be read. Nothing was changed.',

@@ -29,7 +29,7 @@ export async function startJobs(env: Env, log: Logger): Promise<Jobs> {
   const mailer = makeMailer(env);
   await boss.work<AddressedLetter>(
     mailQueue,
-    { batchSize: 10, pollingIntervalSeconds: 0.5 },
+    { batchSize: 1, pollingIntervalSeconds: 0.5 },
     async (batch) => {
       for (const job of batch) await mailer.send(job.data);
     },

@@ -19,13 +19,22 @@ const displayName = z
   .max(limits.displayName);
 
 /** How figures are shown to a person; also kept in the browser for those signed out. */
+const preferenceShape = {
+  units: z.enum(['mm', 'in']),
+  inchGrid: z.union([z.literal(16), z.literal(32), z.literal(64)]),
+  terms: z.enum(['us', 'uk']),
+  theme: z.enum(['system', 'day', 'night']),
+  hand: z.enum(['right', 'left']),
+};
 export const preferencesSchema = z.object({
-  units: z.enum(['mm', 'in']).default('mm'),
-  inchGrid: z.union([z.literal(16), z.literal(32), z.literal(64)]).default(32),
-  terms: z.enum(['us', 'uk']).default('us'),
-  theme: z.enum(['system', 'day', 'night']).default('system'),
-  hand: z.enum(['right', 'left']).default('right'),
+  units: preferenceShape.units.default('mm'),
+  inchGrid: preferenceShape.inchGrid.default(32),
+  terms: preferenceShape.terms.default('us'),
+  theme: preferenceShape.theme.default('system'),
+  hand: preferenceShape.hand.default('right'),
 });
+/** A change of some of them; without defaults, so that the rest stays as it was. */
+const preferenceChange = z.object(preferenceShape).partial();
 export type Preferences = z.infer<typeof preferencesSchema>;
 
 /** The signed-in person, with what they may do (the same abilities the server enforces). */
@@ -74,7 +83,7 @@ export const newPasswordBody = z.object({ token: z.string().min(10).max(200), pa
 export const profileBody = z.object({
   displayName: displayName.optional(),
   shopName: z.string().trim().max(limits.shopName).nullable().optional(),
-  preferences: preferencesSchema.partial().optional(),
+  preferences: preferenceChange.optional(),
 });
 
 export const getMe = contract({

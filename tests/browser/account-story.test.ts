@@ -3,9 +3,10 @@ import { story } from './harness';
 describe('an account', () => {
   story('is made, confirmed by letter, signed in and out', async (stage) => {
     const email = `nell-${Date.now()}@chalk-end.example`;
-    const { page, forgive } = await stage.newPage({ width: 360 });
+    const opened = await stage.newPage({ width: 360 });
+    const { page } = opened;
     // A wrong password answers 401, which the browser notes in its console.
-    forgive(/401/);
+    opened.forgive(/401/);
     await page.goto('/sign-up');
     await page.getByLabel('Name others see').fill('Nell Rabbet');
     await page.getByLabel('E-mail').fill(email);
