@@ -88,10 +88,17 @@ export const reactions =
   /^(?:(?:oh|yeah|wow|nice|look|see|there we go|there you go|hear|ha|haha|beautiful|perfect|whoa|man|boy|yes|nope|ah|ooh|so yeah|okay and|and that|but|which|because|or|don't ask)\b)/;
 
 export const welcome =
-  /\b(?:welcome|hey (?:everybody|everyone|guys|folks|there)|hello|good (?:morning|evening|afternoon|to see you)|what's up|hi (?:everybody|everyone|guys|folks|there|again)|today we|today i|today's|this week|in this (?:video|one)|this time|let's get (?:into|started|going|stuck)|my name is|channel|subscrib\w+)\b/;
+  /\b(?:welcome|howdy|(?:hey|hi) y'all|hey (?:everybody|everyone|guys|folks|there)|hello|good (?:morning|evening|afternoon|to see you)|what's up|hi (?:everybody|everyone|guys|folks|there|again)|today we|today i|today's|this week|in this (?:video|one)|this time|let's get (?:into|started|going|stuck)|my name is|channel|subscrib\w+)\b/;
 export const farewell =
   /\b(?:thanks for|thank you for|see you|catch you|next (?:time|one|week|video)|that's it for|so that is it|that's (?:it|that|the|all)|there (?:it|you|we|they) (?:is|have|are)|bye|subscribe|like and|let me know|in the comments|down below|signing off|take care|if you (?:liked|enjoyed|want)|cheers|i'm happy|all done|final thoughts|wrap(?:ping)? up|until next|stay safe)\b/;
 export const sponsor =
   /\b(?:sponsor\w*|this video is brought|promo code|discount code|use (?:my |the )?code|percent off|free trial|link in the description|affiliate|patreon|merch)\b/;
 export const trying =
   /\b(?:moment of truth|let's (?:see|test|try|fill|load|give)|see (?:if|how) it|test (?:it|run|cut|piece|drive)|try it|does it (?:work|fit)|here we go|in use|how it works|show you how|take it for|put it to|the (?:real|big|final) test|try (?:it|this|that)|set up a|demonstrat\w+|see what it)\b/;
+
+/** How a sign-off begins. */
+export const signOff =
+  /^(?:so |and |okay |alright |right |well |anyway )*(?:that's (?:it|all|that|about|a wrap|the|everything)|that is (?:it|all)|there (?:it is|you go|you have it|we are|we go|they are)|and that's|thanks for|thank you for|if you (?:liked|enjoyed)|until next)\b/;
+/** What ends a welcome. */
+export const letsGo =
+  /\b(?:let's (?:get (?:into|started|going|stuck|to)|go|jump|dive|do it|begin)|here's how|so here we are|grab a)\b/;

@@ -1,4 +1,14 @@
-import { farewell, openings, reactions, sponsor, stopwords, trying, welcome } from './steps.data';
+import {
+  farewell,
+  letsGo,
+  openings,
+  reactions,
+  signOff,
+  sponsor,
+  stopwords,
+  trying,
+  welcome,
+} from './steps.data';
 import { singular } from './measures/counts';
 import { type Token } from './tokens';
 import { type Cue, type Phase } from './types';
@@ -12,6 +22,11 @@ export interface Stretch {
 
 const shortest = 9;
 const usual = 38;
+/** Weights found on the samples: what two like stretches share, what a turn is worth, what a boundary needs. */
+const alike = 0.65;
+const turnWorth = 2;
+const leastNeed = 0.75;
+const silenceNeed = 0.4;
 
 /** Words of topic, by cue. */
 function topics(cues: readonly Cue[], tokens: readonly Token[]): string[][] {
@@ -54,11 +69,22 @@ function openingOf(text: string): number {
   );
 }
 
+/** The end of the welcome and the start of the sign-off are told by their words. */
+function framing(cues: readonly Cue[], at: number, end: number): number {
+  const cue = cues[at];
+  if (!cue) return 0;
+  const text = cue.text.toLowerCase();
+  if (cue.start > end * 0.7 && signOff.test(text)) return 1.2;
+  const before = cues[at - 1]?.text.toLowerCase() ?? '';
+  return cue.start < end * 0.35 && letsGo.test(before) ? 0.8 : 0;
+}
+
 /** How much speaks for a new step at each cue. */
 function scores(cues: readonly Cue[], tokens: readonly Token[]): number[] {
   const words = topics(cues, tokens);
   const scale = pauseScale(cues);
   const starts = sentenceTexts(cues, tokens);
+  const end = cues[cues.length - 1]?.end ?? 0;
   const reach = Math.max(
     4,
     Math.min(14, Math.round(28 / ((cues[cues.length - 1]?.end ?? 1) / Math.max(1, cues.length)))),
@@ -67,7 +93,8 @@ function scores(cues: readonly Cue[], tokens: readonly Token[]): number[] {
     if (i === 0) return 0;
     const gap = Math.max(0, cue.start - (cues[i - 1]?.end ?? 0));
     const pause = Math.min(1.5, gap / scale);
-    return pause * 2.2 + (starts[i] ?? 0) + (turn(words, i, reach) - 0.75) * 3;
+    const frame = framing(cues, i, end);
+    return pause * 2.2 + (starts[i] ?? 0) + frame + (turn(words, i, reach) - alike) * turnWorth;
   });
 }
 
@@ -103,7 +130,7 @@ function need(cues: readonly Cue[]): number {
     (cue, i) => i > 0 && cue.start - (cues[i - 1]?.end ?? 0) >= 0.9,
   ).length;
   const expected = Math.max(1, ((cues[cues.length - 1]?.end ?? 0) - (cues[0]?.start ?? 0)) / 60);
-  return 0.95 + 0.8 * Math.min(1, silences / expected);
+  return leastNeed + silenceNeed * Math.min(1, silences / expected);
 }
 
 /** Boundaries that together score best. */

@@ -33,6 +33,8 @@ function evidence(talk: Talk, at: number, to: number, q: Quantity, lastLength: n
   const next = ended ? '' : (tokens[to]?.w ?? '');
   let sum = formEvidence(q, talk, at);
   if (dimensionWords.has(next)) sum += 3;
+  if (!ended && follows(tokens, to, 'in diameter|width|length|depth|height|thickness|radius'))
+    sum += 3;
   if (
     follows(tokens, to, 'from|up|off|down|back|short|in') &&
     follows(tokens, to + 1, 'the|each|from|one|this|that|either|both')
@@ -179,6 +181,8 @@ const asSpeed = (talk: Talk, at: number, to: number, q: Quantity): boolean =>
 export function readBare(talk: Talk, at: number, q: Quantity, heard: Heard): Found | null {
   const { tokens } = talk;
   const to = at + q.n;
+  const faster = heard.last?.unit === 'rpm' ? carried(talk, at, to, q, heard.last) : null;
+  if (faster) return faster;
   if (ruledOut(tokens, at, to, q)) return null;
   const base = { from: at, n: q.n, values: [q.said], inferred: true as const };
   const same = carried(talk, at, to, q, heard.last);

@@ -94,7 +94,7 @@ export const angleWords =
   set(`angle angles bevel bevels bevelled beveled miter miters mitre mitres mitred mitered tilt tilted degree degrees chamfer chamfers
   blade protractor corner corners countersink countersunk splay splayed`);
 export const abrasiveWords = set(
-  `grit grits sand sanding sanded sandpaper paper scuff abrasive sander sanders disc discs mesh`,
+  `rub denib grit grits sand sanding sanded sandpaper paper scuff abrasive sander sanders disc discs mesh`,
 );
 export const ratioWords =
   set(`mix mixed mixing ratio part parts thin thinned thinning cut dilute diluted resin hardener epoxy water alcohol spirit spirits thinner
