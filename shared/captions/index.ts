@@ -3,6 +3,7 @@ export { readCaptions, toVtt } from './read/read';
 export { plainText } from './read/cue-text';
 export { vttTime } from './read/time';
 export { jot } from './jot';
+export { matchJottings } from './match';
 export { heardIn, toDraft, type DraftStep, type HeardStretch } from './draft';
 export type {
   CaptionFault,
