@@ -3,6 +3,25 @@
  * make a caution; a duty ("unplug it") has two by itself, a danger word or a warning word one.
  */
 export const cautionSigns: readonly { is: RegExp; weight: number }[] = [
+  { is: /^let (?:it|the \w+|that) (?:run|wind|spin|slow) down\b/, weight: 1.4 },
+  {
+    is: /^(?:before|until) (?:you|i|we) (?:lift|reach|touch|move|clear|change|take|start|switch|turn) (?:it |the |\w+ )?/,
+    weight: 0.8,
+  },
+  {
+    is: /^(?:watch|mind|protect) (?:your |the )?(?:eyes|lungs|hearing|sleeves|hair|ears)\b/,
+    weight: 2,
+  },
+  { is: /^(?:glasses|specs|goggles) on\b/, weight: 1.4 },
+  {
+    is: /^(?:roll|push) (?:up )?(?:your|those|the) sleeves\b|^(?:take|get) (?:your |any |the )?(?:rings?|watch|jewell?ery|gloves) off\b|^take off (?:your |any )?(?:rings?|watch|jewell?ery|gloves)\b/,
+    weight: 2,
+  },
+  { is: /^chuck key\b|^chalk key\b/, weight: 0.8 },
+  { is: /^check (?:\w+ ){0,5}(?:detector|cables|pipes|wires|wiring|nails)\b/, weight: 2 },
+  { is: /^(?:open|crack) (?:the|a|some|your) (?:windows?|doors?|garage)\b/, weight: 1.2 },
+  { is: /^(?:windows?|doors?) (?:open|mind)\b/, weight: 0.9 },
+  { is: /^(?:by|with|in) (?:your |one )?hands?\b/, weight: 0.5 },
   {
     is: /^(?:wear|put on|wearing|throw on|grab|get|use|put) (?:\w+ ){0,3}(?:glasses|specs|goggles|visor|respirator|ear (?:plugs|muffs|defenders|protection)|eye protection|face shield|hearing protection|dust mask|mask|earplugs|ppe|apron|shield)\b/,
     weight: 2,

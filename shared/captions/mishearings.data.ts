@@ -30,7 +30,7 @@ tendon, tendons > tenon, tenons | JOINT CUT mortise | muscle doctor achilles inj
 tenant, tenants > tenon, tenons | mortise joint shoulder cheek saw glue fit stretcher rung leg | rent landlord house lease flat
 more tease, more tees, morris, more tis, mortis, more this > mortise | tenon tendon tenons tendons JOINT chisel |
 mortar's, mortars > mortises | tenon tenons joint chisel |
-in grain, and grain, engrain > end grain | look glue wood plane glass soak smooth sand cut board seal absorb glassy shooting pass | ingrained
+in grain, and grain, engrain > end grain | look glue wood plane glass soak smooth sand cut board seal absorb glassy shooting pass planer | ingrained
 living knife, driving knife, giving knife, arriving knife, raving knife > riving knife | * |
 father board, father boards, further board > feather board, feather boards, feather boards | * |
 fetter board, weather board, leather board > feather board | saw table fence router pressure push | roof siding cladding house
@@ -62,7 +62,7 @@ chalk, chock, chuk > chuck | drill bit driver speed jaws press lathe tighten key
 french clean, french clear, french clique, french creek, french kleet, friend cleat, french cleet, french please > french cleat | * |
 kleet, cleet > cleat | french wall hang hook screw strip bevel | wipe up up dust cloth nice surface
 bezel, bevil > bevel | angle square tilt degree degrees saw blade chisel edge gauge grind sharpen sliding | watch screen phone herbs pasta level
-bird, birds, brrr > burr, burrs, burr | edge edges scraper metal file steel deburr hook feel stone iron back drill drilled knife | house feeder nest sing box table sky
+bird, birds, brrr > burr, burrs, burr | edge edges scraper metal file steel deburr hook feel stone iron back drill drilled knife off take | house feeder nest sing box table sky
 call it, collett, caulet > collet | router bit chuck rod shank tighten spindle wrench pointed nut quarter | phone name day done good
 travel, trample > trammel | circle circles arm pivot pin radius router arc swings swing beam | trip plane car holiday abroad distance
 fennel lick, phonetic, fanatic, phonolic, finolic, fennelic, final lick > phenolic | sheet plate base router insert thick drill tape quarter top | alphabet music

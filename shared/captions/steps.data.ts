@@ -102,3 +102,6 @@ export const signOff =
 /** What ends a welcome. */
 export const letsGo =
   /\b(?:let's (?:get (?:into|started|going|stuck|to)|go|jump|dive|do it|begin)|here's how|so here we are|grab a)\b/;
+/** How the first piece of work begins. */
+export const begins =
+  /^(?:so |and |okay |alright |right |now |ok )*(?:first\b|the first thing|to start|let's start|i'm starting|we're starting|we start|i'll start|start (?:by|with|off))/;

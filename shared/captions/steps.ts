@@ -1,4 +1,5 @@
 import {
+  begins,
   farewell,
   letsGo,
   openings,
@@ -177,10 +178,41 @@ function phaseOf(
   return trying.test(opening) && place > total / 2 ? 'demo' : 'build';
 }
 
+/** The sign-off begins where its words do, however little the stretch was parted before. */
+function partOutro(cues: readonly Cue[], starts: number[]): number[] {
+  const last = starts[starts.length - 1] ?? 0;
+  if (count(textOf(cues, last, cues.length), farewell) < 2) return starts;
+  for (let k = last + 1; k < cues.length; k += 1) {
+    const text = cues[k]?.text.toLowerCase() ?? '';
+    if (signOff.test(text) && (cues[k]?.start ?? 0) - (cues[last]?.start ?? 0) >= shortest)
+      return [...starts, k];
+  }
+  return starts;
+}
+
+/** The welcome ends where the first thing is begun. */
+function partIntro(cues: readonly Cue[], starts: number[]): number[] {
+  const second = starts[1] ?? cues.length;
+  if (!welcome.test(textOf(cues, 0, Math.min(3, second)))) return starts;
+  for (let k = 1; k < second; k += 1) {
+    const start = cues[k]?.start ?? 0;
+    if (
+      start >= shortest &&
+      begins.test(cues[k]?.text.toLowerCase() ?? '') &&
+      (cues[second]?.start ?? Infinity) - start >= shortest
+    )
+      return [0, k, ...starts.slice(1)];
+  }
+  return starts;
+}
+
 /** Stretches of the clip that may become steps, first to last, with nothing between them. */
 export function findStretches(cues: readonly Cue[], tokens: readonly Token[]): Stretch[] {
   if (cues.length === 0) return [];
-  const starts = [0, ...boundaries(cues, scores(cues, tokens), need(cues))];
+  const starts = partIntro(
+    cues,
+    partOutro(cues, [0, ...boundaries(cues, scores(cues, tokens), need(cues))]),
+  );
   return starts.map((from, place) => {
     const to = starts[place + 1] ?? cues.length;
     return { from, to, phase: phaseOf(cues, from, to, place, starts.length) };

@@ -72,7 +72,9 @@ export function piecesOf(raw: string): string[] {
     )
       out.push('by');
     else if (isNumber(before) && contractions.test(w)) {
-      if (w !== 's' && !before?.includes('/')) out[out.length - 1] = `${before ?? ''}${w}`;
+      // "2x4s" are sticks.
+      if (w === 's' && out[out.length - 2] === 'by') out.push('sticks');
+      else if (w !== 's' && !before?.includes('/')) out[out.length - 1] = `${before ?? ''}${w}`;
     } else if (/^\d{1,3}(?:,\d{3})+$/.test(w)) out.push(w.replace(/,/g, ''));
     else out.push(signs[w] ?? w);
   });

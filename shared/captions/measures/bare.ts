@@ -15,7 +15,7 @@ import {
 } from './words.data';
 
 const telling =
-  "is|it's|says|say|reads|read|really|was|measures|measure|be|makes|are|that's|equals|called|got|get|gets|come|comes|came|actually|exactly|roughly|about|mine|around|just|only";
+  "is|it's|says|say|reads|read|really|was|measures|measure|be|makes|are|that's|mine's|equals|called|got|get|gets|come|comes|came|actually|exactly|roughly|about|mine|around|just|only";
 const arithmetic = 'plus|minus|less|off|leaves|add|subtract|equals|gives|leaving';
 
 function sizedBefore(tokens: readonly Token[], at: number, reach: number): boolean {
@@ -25,6 +25,12 @@ function sizedBefore(tokens: readonly Token[], at: number, reach: number): boole
   }
   return false;
 }
+
+const places = new Set(
+  'top middle bottom end front back left right centre center skirting foot head side other narrow wide'.split(
+    ' ',
+  ),
+);
 
 /** How strongly the words say that a bare number is a size; 2 is enough. */
 function evidence(talk: Talk, at: number, to: number, q: Quantity, lastLength: number): number {
@@ -41,6 +47,8 @@ function evidence(talk: Talk, at: number, to: number, q: Quantity, lastLength: n
   )
     sum += 1.2;
   if (!ended && follows(tokens, to, 'between|across')) sum += 1.2;
+  if (!ended && follows(tokens, to, 'at|in|on the') && places.has(tokens[to + 2]?.w ?? ''))
+    sum += 1.2;
   if (follows(tokens, at - 1, 'over') && at - lastLength <= 10) sum += 1;
   const k = follows(tokens, at - 1, 'about|around|roughly|exactly|just|maybe|like|say|only|a')
     ? at - 2
@@ -175,7 +183,10 @@ const speedWords = new Set([
 
 /** "running at eighteen thousand": a speed, for no size of a build is as large. */
 const asSpeed = (talk: Talk, at: number, to: number, q: Quantity): boolean =>
-  q.said >= 5000 && q.said <= 40_000 && near(talk.tokens, at, to, speedWords, 8, 5);
+  (q.said >= 5000 && q.said <= 40_000 && near(talk.tokens, at, to, speedWords, 8, 5)) ||
+  (q.said >= 200 &&
+    q.said <= 40_000 &&
+    follows(talk.tokens, at - 2, 'spinning|running|turning|speed|spins|runs at|to|about|of'));
 
 /** A number without a unit that the words make a length, an angle or a speed. */
 export function readBare(talk: Talk, at: number, q: Quantity, heard: Heard): Found | null {

@@ -108,7 +108,7 @@ function sizedThing({ tokens, ...talk }: Talk, at: number): boolean {
     const w = tokens[at + n + k]?.w ?? '';
     if (neverCounted.has(w)) return false;
     if (plural(w) && (countables.has(singular(w)) || fastenerNouns.has(w))) return true;
-    if (!adjectives.has(w) && !countables.has(w)) return false;
+    if (/^(?:in|to|at|on|the|and|so|for|with|from|is|are|by|then|of|a|it)$/.test(w)) return false;
   }
   return false;
 }
@@ -149,6 +149,12 @@ export function readCount(talk: Talk, at: number): Found | null {
   if (follows(tokens, to, 'or so') && sizedThing(talk, to + 2)) return count(number.n);
   if (follows(tokens, to, 'doors down')) return null;
   if (readUnit(tokens, to) && !/^(?:min|second)$/.test(tokens[to]?.w ?? '')) return null;
+  if (
+    follows(tokens, at - 1, 'need|make|cut|want') &&
+    (follows(tokens, to, 'of each|obviously|altogether') ||
+      follows(tokens, to, 'for|per each|side|end'))
+  )
+    return count(number.n);
   const noun = countedNoun(tokens, to);
   if (!noun) return null;
   if (!noun.listed && !near(tokens, at, at, makingVerbs, 4, 0)) return null;

@@ -12,6 +12,11 @@ import {
   waiting,
 } from './words.data';
 
+const loadWords = new Set(
+  'weigh weighs weight hold holds load loads carry carries force pressure clamp clamping cramp rated'.split(
+    ' ',
+  ),
+);
 const idle =
   'to find|to get|to figure|looking|trying|talking|arguing|fighting|wondering|cursing|laughing|of your|of my';
 
@@ -54,6 +59,18 @@ export function belongs(talk: Talk, found: Found): boolean {
   if (found.unit === 'percent') return near(tokens, found.from, to, percentWords, 6, 4);
   if (found.unit === 'lb' && near(tokens, found.from, to, costs, 5, 2)) return false;
   if (follows(tokens, to, 'lighter|heavier|richer|poorer')) return false;
+  if (
+    found.unit === 'lb' &&
+    follows(tokens, to, 'a|per|each|for') &&
+    !follows(tokens, to + 1, 'inch|foot|clamp|corner|side|wheel|shelf')
+  )
+    return false;
+  if (
+    found.unit === 'lb' &&
+    talk.units === 'metric' &&
+    !near(tokens, found.from, to, loadWords, 7, 6)
+  )
+    return false;
   const single = follows(tokens, found.from, 'a|an') && found.values[0] === 1;
   if (single && (found.unit === 'lb' || found.unit === 'kg')) return false;
   if (single && found.unit === 'ft')

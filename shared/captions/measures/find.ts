@@ -125,6 +125,11 @@ function quantityAt(talk: Talk, at: number, memory: Memory): { found: Found | nu
 function numberStarts(tokens: readonly Token[], at: number): boolean {
   const before = tokens[at - 1]?.w ?? '';
   // The tail of a number that was read as something else.
+  if (
+    tokens[at]?.w === 'one' &&
+    /^(?:each|this|that|every|which|another|other|first|last|next|big|old|new)$/.test(before)
+  )
+    return false;
   return !(before === 'point' || before === '$' || before === '€' || before === '£');
 }
 
@@ -177,7 +182,11 @@ function countAgain({ tokens }: Talk, at: number, memory: Memory): Found | null 
   const number = readNumber(tokens, at);
   if (!number || number.form !== 'whole' || number.value > 60 || at - memory.lastCount > 18)
     return null;
-  if (!follows(tokens, at + number.n, 'at') || !follows(tokens, at - 1, 'and|then|plus|another'))
+  if (
+    !follows(tokens, at + number.n, 'at|of') ||
+    follows(tokens, at + number.n, 'of the') ||
+    !follows(tokens, at - 1, 'and|then|plus|another')
+  )
     return null;
   return { from: at, n: number.n, values: [number.value], unit: 'count' };
 }

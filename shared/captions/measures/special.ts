@@ -300,13 +300,7 @@ export function readRatio({ tokens }: Talk, at: number): Found | null {
   if (unit && !parts && tokens[to]?.w !== 'a') return null;
   if (parts && !follows(tokens, to, 'part|parts|of')) return null;
   const colon = tokens[i]?.w === ':';
-  if (
-    !parts &&
-    !colon &&
-    !near(tokens, at, to, ratioWords, 9, 6) &&
-    !(a.value === 1 && b.value === 1)
-  )
-    return null;
+  if (!parts && !colon && !near(tokens, at, to, ratioWords, 9, 6) && b.value !== 1) return null;
   if (slope && !near(tokens, at, to, ratioWords, 9, 6)) return null;
   if (colon && follows(tokens, at - 1, 'at|around|by')) return null;
   return found(at, to - at, [a.value, b.value], 'ratio');

@@ -85,7 +85,7 @@ export const lumberNouns =
   set(`lumber timber stock stud studs post posts joist joists board boards scrap offcut framing cls construction pine fir spruce
   material rafter rafters beam beams frame stick sticks length lengths block blocks`);
 export const screwNouns = set(
-  `screw screws lag lags spax deckscrew woodscrew woodscrews chipboard plug plugs coach`,
+  `screw screws lag lags spax deckscrew woodscrew woodscrews chipboard plug plugs coach fixing fixings`,
 );
 export const boltNouns = set(
   `bolt bolts nut nuts insert inserts stud rod tap thread threads threaded machine knob hex allen cap carriage socket t-bolt washer washers`,
@@ -94,10 +94,10 @@ export const angleWords =
   set(`angle angles bevel bevels bevelled beveled miter miters mitre mitres mitred mitered tilt tilted degree degrees chamfer chamfers
   blade protractor corner corners countersink countersunk splay splayed`);
 export const abrasiveWords = set(
-  `rub denib grit grits sand sanding sanded sandpaper paper scuff abrasive sander sanders disc discs mesh`,
+  `rub denib polish burnish grit grits sand sanding sanded sandpaper paper scuff abrasive sander sanders disc discs mesh`,
 );
 export const ratioWords =
-  set(`mix mixed mixing ratio part parts thin thinned thinning cut dilute diluted resin hardener epoxy water alcohol spirit spirits thinner
+  set(`blend mix mixed mixing ratio part parts thin thinned thinning cut dilute diluted resin hardener epoxy water alcohol spirit spirits thinner
   slope pitch taper dovetail dovetails dovetailed`);
 /** Words right after a number that make it something else than a length. */
 export const otherUnits =
