@@ -1,4 +1,5 @@
 import { type PlanDocument } from '../document';
+import { createModel, type PlanModel } from '../model';
 import { type Finding, type RuleLevel } from './rule';
 import { rules } from './rules';
 
@@ -17,10 +18,12 @@ export interface CheckSheet {
 }
 
 /**
- * Runs the check sheet's rules over a plan. A failing *must* is `fails`, a *should* `at-risk`, a note
+ * Runs the check sheet's rules over a plan; give the model where it is there already. A failing *must* is `fails`, a *should* `at-risk`, a note
  * `needs-a-reading`. Rules that the creator switched off (never a must) are left out.
  */
-export function checkSheet(document: PlanDocument): CheckSheet {
+export function checkSheet(document: PlanDocument, given?: PlanModel): CheckSheet {
+  let made = given;
+  const model = () => (made ??= createModel(document));
   const off = (rule: string, level: RuleLevel, elementId: string | null) =>
     level !== 'must' &&
     document.switchedOff.some(
@@ -30,7 +33,7 @@ export function checkSheet(document: PlanDocument): CheckSheet {
   let quiet = 0;
   for (const rule of rules) {
     const found = rule
-      .run({ document })
+      .run({ document, model })
       .filter((f) => !off(rule.id, rule.level, f.place.elementId));
     if (found.length === 0) quiet += 1;
     const verdict =

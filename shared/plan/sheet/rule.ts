@@ -1,4 +1,5 @@
 import { type PlanDocument } from '../document';
+import { type PlanModel } from '../model';
 
 export type RuleLevel = 'must' | 'should' | 'note';
 
@@ -41,6 +42,8 @@ export interface Rule {
 /** What rules look at. */
 export interface RuleContext {
   document: PlanDocument;
+  /** The plan worked out, at design; made when the first rule asks for it. */
+  model: () => PlanModel;
 }
 
 export const stepName = (document: PlanDocument, stepId: string): string => {

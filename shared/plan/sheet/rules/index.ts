@@ -1,4 +1,8 @@
 import { type Rule } from '../rule';
+import { checksVerdict } from './checks-verdict';
+import { dimsResolve } from './dims-resolve';
+import { dimsUntaken } from './dims-untaken';
+import { dimsUnused } from './dims-unused';
 import { linksDisclosure } from './links-disclosure';
 import { mediaAlt } from './media-alt';
 import { mediaCaptions } from './media-captions';
@@ -13,6 +17,9 @@ import { timeCure } from './time-cure';
 /** The rules in the order of the sheet. Adding a rule is adding a file and its line here. */
 export const rules: readonly Rule[] = [
   planSteps,
+  dimsResolve,
+  dimsUntaken,
+  checksVerdict,
   textEmpty,
   textLong,
   partsMade,
@@ -22,4 +29,5 @@ export const rules: readonly Rule[] = [
   mediaCaptions,
   mediaStretch,
   timeCure,
+  dimsUnused,
 ];

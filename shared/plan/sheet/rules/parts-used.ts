@@ -10,7 +10,8 @@ export const partsUsed: Rule = {
       const named = document.steps.some(
         (s) =>
           s.parts.some((p) => p.partId === part.id && p.to !== 'roughed' && p.to !== 'sized') ||
-          s.text.includes(`{{part:${part.id}}}`) ||
+          // A part that is only cut in a step is named there, but not put to use.
+          (s.text.includes(`{{part:${part.id}}}`) && !s.parts.some((p) => p.partId === part.id)) ||
           s.actions.some(
             (a) =>
               ('partIds' in a && a.do !== 'cut' && a.partIds.includes(part.id)) ||
