@@ -15,13 +15,21 @@ async function serve(env: Env): Promise<void> {
   const jobs = await startJobs(env, log);
   const app = createApp({ env, db, storage, jobs, log, now: () => new Date() });
   const server = createServer(app);
+  server.once('error', (error: NodeJS.ErrnoException) => {
+    const taken = error.code === 'EADDRINUSE';
+    process.stderr.write(
+      taken ? `Port ${env.PORT} is taken. Set PORT to another one.\n` : `${error.message}\n`,
+    );
+    process.exit(1);
+  });
   server.listen(env.PORT, env.HOST, () => log.info({ port: env.PORT }, 'listening'));
   let stopping = false;
   const stop = async () => {
     if (stopping) return;
     stopping = true;
-    server.close();
+    const closed = new Promise<void>((resolve) => server.close(() => resolve()));
     server.closeIdleConnections();
+    await Promise.race([closed, new Promise((resolve) => setTimeout(resolve, 5000).unref())]);
     await jobs.stop();
     await db.destroy();
     process.exit(0);

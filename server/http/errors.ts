@@ -72,7 +72,7 @@ export const missing = (what: string): ApiError =>
 export const notAllowed = (why: string): ApiError => new ApiError('auth/not-allowed', why);
 
 /** A value the database already has: SQLSTATE 23505. */
-function uniqueViolation(error: unknown): boolean {
+export function uniqueViolation(error: unknown): boolean {
   const driver = (error as { driverError?: { code?: string } }).driverError;
   return driver?.code === '23505' || (error as { code?: string }).code === '23505';
 }

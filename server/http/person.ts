@@ -11,6 +11,19 @@ export function personOf(req: Request): PersonEntity | null {
 export const isModerator = (person: PersonEntity | null): boolean =>
   person !== null && (person.roles.includes('moderator') || person.roles.includes('admin'));
 
+/** Is the account closed at this moment by a ruling? */
+export const isSuspended = (person: PersonEntity, now: Date): boolean =>
+  person.suspendedUntil !== null && person.suspendedUntil > now;
+
+/** The refusal that says why and until when. */
+export function suspendedError(person: PersonEntity): ApiError {
+  const until = person.suspendedUntil?.toISOString().slice(0, 10) ?? '';
+  return new ApiError(
+    'auth/suspended',
+    `This account is suspended ${until.startsWith('9999') ? 'for good' : `until ${until}`}: ${person.suspendedFor ?? ''} You may appeal by answering the letter.`,
+  );
+}
+
 /** Does the person stand above the floor? */
 export function meetsAccess(person: PersonEntity | null, access: Access): boolean {
   if (access === 'public') return true;
@@ -22,7 +35,8 @@ export function meetsAccess(person: PersonEntity | null, access: Access): boolea
 }
 
 /** Throws the fitting refusal when somebody stands below the floor. */
-export function requireAccess(person: PersonEntity | null, access: Access): void {
+export function requireAccess(person: PersonEntity | null, access: Access, now: Date): void {
+  if (person && access !== 'public' && isSuspended(person, now)) throw suspendedError(person);
   if (meetsAccess(person, access)) return;
   if (!person)
     throw new ApiError(

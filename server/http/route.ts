@@ -92,7 +92,7 @@ export function route<C extends AnyContract>(
 ): void {
   mounted.set(contract.id, contract);
   const floor: RequestHandler = (req, _res, next) => {
-    requireAccess(personOf(req), contract.access);
+    requireAccess(personOf(req), contract.access, deps.now());
     next();
   };
   const act: RequestHandler = async (req, res) => {

@@ -55,8 +55,7 @@ export function sessions(deps: Deps): RequestHandler[] {
   auth.serializeUser((person, done) => done(null, (person as { id: string }).id));
   auth.deserializeUser((id: string, done) => {
     findPersonById(deps.db, id).then((person) => {
-      const out = !person || (person.suspendedUntil !== null && person.suspendedUntil > deps.now());
-      done(null, out ? false : person);
+      done(null, person ?? false);
     }, done);
   });
   return [

@@ -50,6 +50,19 @@ export async function useToken(
   return rows[0]?.[0]?.person_id ?? null;
 }
 
+/** Letters sent before stop working. */
+export async function voidTokens(
+  db: Db,
+  personId: string,
+  purpose: 'confirm' | 'reset',
+  now: Date,
+): Promise<void> {
+  await db.query(
+    `UPDATE email_tokens SET used_at = $3 WHERE person_id = $1 AND purpose = $2 AND used_at IS NULL`,
+    [personId, purpose, now],
+  );
+}
+
 export interface SessionRow {
   sid: string;
   sess: { device?: string; createdAt?: string; lastSeenAt?: string };

@@ -3,7 +3,7 @@ import * as api from '../../../shared/api/accounts';
 import { type PersonEntity } from '../../db/entities/person';
 import { type Deps } from '../../deps';
 import { ApiError, missing, notAllowed } from '../../http/errors';
-import { isModerator } from '../../http/person';
+import { isModerator, isSuspended, suspendedError } from '../../http/person';
 import { route, signedIn } from '../../http/route';
 import { appendLog } from '../log/log.service';
 import {
@@ -101,12 +101,7 @@ async function begin(deps: Deps, req: Request, person: PersonEntity): Promise<vo
 function sessionRoutes(router: Router, deps: Deps): void {
   route(router, deps, api.signIn, async ({ req }) => {
     const person = await authenticate(req);
-    if (person.suspendedUntil && person.suspendedUntil > deps.now()) {
-      throw new ApiError(
-        'auth/suspended',
-        `This account is suspended until ${person.suspendedUntil.toISOString().slice(0, 10)}: ${person.suspendedFor ?? ''} You may appeal by answering the letter.`,
-      );
-    }
+    if (isSuspended(person, deps.now())) throw suspendedError(person);
     await begin(deps, req, person);
     return me(deps, person);
   });
@@ -183,7 +178,9 @@ function adminRoutes(router: Router, deps: Deps): void {
 }
 
 export function registerAccounts(router: Router, deps: Deps): void {
-  route(router, deps, api.getMe, async ({ person }) => (person ? me(deps, person) : { me: null }));
+  route(router, deps, api.getMe, async ({ person }) =>
+    person && !isSuspended(person, deps.now()) ? me(deps, person) : { me: null },
+  );
   sessionRoutes(router, deps);
   letterRoutes(router, deps);
   route(router, deps, api.updateProfile, async ({ body, person }) => {

@@ -4,7 +4,7 @@ import { type z } from 'zod';
 import { type signUpBody } from '../../../shared/api/accounts';
 import { PersonEntity } from '../../db/entities/person';
 import { type Deps } from '../../deps';
-import { ApiError } from '../../http/errors';
+import { ApiError, uniqueViolation } from '../../http/errors';
 import { confirmLetter, knownLetter, resetLetter } from '../../mail/letters';
 import {
   endSessions,
@@ -14,6 +14,7 @@ import {
   keepToken,
   savePerson,
   useToken,
+  voidTokens,
 } from './accounts.repository';
 import { hashPassword, newToken, tokenHash } from './passwords';
 
@@ -37,8 +38,7 @@ async function linkFor(
   return `${deps.env.APP_ORIGIN}/${page}?token=${token}`;
 }
 
-/** Makes the account, or tells the one who has it; the caller cannot see which. */
-export async function signUpPerson(deps: Deps, input: z.output<typeof signUpBody>): Promise<void> {
+async function signUpOnce(deps: Deps, input: z.output<typeof signUpBody>): Promise<void> {
   const passwordHash = await hashPassword(input.password);
   await deps.db.transaction(async (manager) => {
     const known = await findPersonByEmail(manager, input.email);
@@ -64,6 +64,22 @@ export async function signUpPerson(deps: Deps, input: z.output<typeof signUpBody
     const link = await linkFor(deps, manager, person.id, 'confirm');
     await deps.jobs.mail(person.email, confirmLetter(person.displayName, link), manager);
   });
+}
+
+const tries = 3;
+
+/**
+ * Makes the account, or tells the one who has it; the caller cannot see which. Two at once can meet on
+ * the same e-mail or handle: the loser tries again and finds the other there.
+ */
+export async function signUpPerson(deps: Deps, input: z.output<typeof signUpBody>): Promise<void> {
+  for (let n = 1; ; n += 1) {
+    try {
+      return await signUpOnce(deps, input);
+    } catch (error) {
+      if (n >= tries || !uniqueViolation(error)) throw error;
+    }
+  }
 }
 
 const spent = () =>
@@ -109,6 +125,7 @@ export async function setNewPassword(deps: Deps, token: string, password: string
     person.passwordHash = passwordHash;
     person.emailConfirmedAt ??= deps.now();
     await savePerson(manager, person);
+    await voidTokens(manager, person.id, 'reset', deps.now());
     await endSessions(manager, person.id);
   });
 }

@@ -3,8 +3,6 @@ import { type Router } from 'express';
 import * as api from '../../../shared/api/bench';
 import { limits } from '../../../shared/api/limits';
 import { foldEntries } from '../../../shared/plan/bench/fold';
-import { planFacts } from '../../../shared/plan/facts';
-import { readDocument } from '../../../shared/plan/upgrade';
 import { BenchCopyEntity, ShopCardEntity } from '../../db/entities/bench';
 import { type PersonEntity } from '../../db/entities/person';
 import { type Deps } from '../../deps';
@@ -13,7 +11,8 @@ import { route, signedIn } from '../../http/route';
 import { findPersonById } from '../accounts/accounts.repository';
 import { presentPerson } from '../accounts/accounts.presenter';
 import { canSeePlan } from '../plans/plans.policy';
-import { findPlan, findRevision } from '../plans/plans.repository';
+import { frozenRevision } from '../plans/frozen';
+import { findPlan } from '../plans/plans.repository';
 import {
   addEntry,
   copiesOf,
@@ -40,19 +39,18 @@ async function ownCopy(deps: Deps, copyId: string, person: PersonEntity): Promis
 async function presentCopy(deps: Deps, copy: BenchCopyEntity): Promise<api.BenchCopy> {
   const [plan, revision, rows] = await Promise.all([
     findPlan(deps.db, copy.planId),
-    findRevision(deps.db, copy.revisionId),
+    frozenRevision(deps.db, copy.revisionId),
     entriesOf(deps.db, copy.id),
   ]);
   if (!plan || !revision) throw missing('That bench copy');
   const [maker, current] = await Promise.all([
     findPersonById(deps.db, plan.ownerId),
-    plan.currentRevisionId ? findRevision(deps.db, plan.currentRevisionId) : null,
+    plan.currentRevisionId ? frozenRevision(deps.db, plan.currentRevisionId) : null,
   ]);
   if (!maker) throw missing('That bench copy');
-  const document = readDocument(revision.document);
+  const { document, facts } = revision;
   const entries = rows.map(presentEntry);
   const state = foldEntries(entries.map(({ entry, sequence }) => ({ entry, sequence })));
-  const facts = planFacts(document);
   return {
     id: copy.id,
     planId: plan.id,
@@ -60,11 +58,11 @@ async function presentCopy(deps: Deps, copy: BenchCopyEntity): Promise<api.Bench
     title: document.title,
     maker: presentPerson(maker),
     revision: {
-      id: revision.id,
-      letter: revision.letter,
-      publishedAt: revision.publishedAt.toISOString(),
+      id: revision.row.id,
+      letter: revision.row.letter,
+      publishedAt: revision.row.publishedAt.toISOString(),
     },
-    newerLetter: current && current.id !== revision.id ? current.letter : null,
+    newerLetter: current && current.row.id !== revision.row.id ? current.row.letter : null,
     startedAt: copy.startedAt.toISOString(),
     lastEntryAt: entries[entries.length - 1]?.receivedAt ?? null,
     steps: document.steps.length,
@@ -95,9 +93,9 @@ async function start(
   }
   const [plan, revision] = await Promise.all([
     findPlan(deps.db, planId),
-    findRevision(deps.db, revisionId),
+    frozenRevision(deps.db, revisionId),
   ]);
-  if (!plan || !revision || revision.planId !== plan.id || !canSeePlan(person, plan))
+  if (!plan || !revision || revision.row.planId !== plan.id || !canSeePlan(person, plan))
     throw missing('That plan');
   const copies = deps.db.getRepository(BenchCopyEntity);
   return copies.save(copies.create({ id: copyId, personId: person.id, planId, revisionId }));

@@ -1,8 +1,7 @@
-import { readDocument } from '../../../shared/plan/upgrade';
-import { planFacts } from '../../../shared/plan/facts';
 import { type Deps } from '../../deps';
 import { type PageHead } from '../../http/web';
-import { findPlanBySlug, findRevision } from './plans.repository';
+import { frozenRevision } from './frozen';
+import { findPlanBySlug } from './plans.repository';
 
 /** Title, description and schema.org HowTo of a published plan's page. */
 export async function headFor(deps: Deps, path: string): Promise<PageHead | null> {
@@ -10,10 +9,9 @@ export async function headFor(deps: Deps, path: string): Promise<PageHead | null
   if (!slug) return null;
   const plan = await findPlanBySlug(deps.db, slug);
   if (!plan || plan.state !== 'published' || !plan.currentRevisionId) return null;
-  const revision = await findRevision(deps.db, plan.currentRevisionId);
+  const revision = await frozenRevision(deps.db, plan.currentRevisionId);
   if (!revision) return null;
-  const document = readDocument(revision.document);
-  const facts = planFacts(document);
+  const { document, facts } = revision;
   return {
     title: `${document.title} · Scantling`,
     description: document.summary,

@@ -2,7 +2,7 @@ import { type DraftCard, type PlanCard, type RevisionRef } from '../../../shared
 import { type PlanEntity, type RevisionEntity } from '../../db/entities/plan';
 import { type CardRow } from './plans.repository';
 
-export const presentRevision = (r: RevisionEntity): RevisionRef => ({
+export const presentRevision = (r: Omit<RevisionEntity, 'document'>): RevisionRef => ({
   id: r.id,
   letter: r.letter,
   sha256: r.sha256,

@@ -32,7 +32,8 @@ export const revisionByLetter = (
   db: Db,
   planId: string,
   letter: string,
-): Promise<RevisionEntity | null> => db.getRepository(RevisionEntity).findOneBy({ planId, letter });
+): Promise<Pick<RevisionEntity, 'id'> | null> =>
+  db.getRepository(RevisionEntity).findOne({ where: { planId, letter }, select: { id: true } });
 
 /** A row of the list as the query gives it. */
 export interface CardRow {

@@ -1,12 +1,12 @@
 import { type Router } from 'express';
 import { getPlan, listPlans, type PlanPage } from '../../../shared/api/plans';
-import { readDocument } from '../../../shared/plan/upgrade';
 import { type PersonEntity } from '../../db/entities/person';
 import { type PlanEntity } from '../../db/entities/plan';
 import { type Deps } from '../../deps';
 import { missing } from '../../http/errors';
 import { isModerator } from '../../http/person';
 import { route } from '../../http/route';
+import { frozenRevision } from './frozen';
 import { findPersonById } from '../accounts/accounts.repository';
 import { presentPerson } from '../accounts/accounts.presenter';
 import { canDraft, canSeePlan, canTalkOn } from './plans.policy';
@@ -14,7 +14,6 @@ import { presentCard, presentRevision } from './plans.presenter';
 import {
   copyCounts,
   findPlanBySlug,
-  findRevision,
   listCards,
   revisionByLetter,
   revisionsOf,
@@ -28,11 +27,10 @@ async function planPage(
   letter: string | undefined,
   person: PersonEntity | null,
 ): Promise<PlanPage> {
-  const revision = letter
-    ? await revisionByLetter(deps.db, plan.id, letter)
-    : plan.currentRevisionId
-      ? await findRevision(deps.db, plan.currentRevisionId)
-      : null;
+  const revisionId = letter
+    ? (await revisionByLetter(deps.db, plan.id, letter))?.id
+    : plan.currentRevisionId;
+  const revision = revisionId ? await frozenRevision(deps.db, revisionId) : null;
   if (!revision) throw missing(letter ? `Revision ${letter}` : 'That plan');
   const [maker, revisions, talk, copies] = await Promise.all([
     findPersonById(deps.db, plan.ownerId),
@@ -45,8 +43,8 @@ async function planPage(
     id: plan.id,
     slug: plan.slug ?? '',
     maker: presentPerson(maker),
-    revision: presentRevision(revision),
-    document: readDocument(revision.document),
+    revision: presentRevision(revision.row),
+    document: revision.document,
     revisions: revisions.map(presentRevision),
     talk,
     benchCopies: copies.all,

@@ -6,14 +6,14 @@ import {
   type Thread,
 } from '../../../shared/api/talk';
 import { type QueryOf } from '../../../shared/api/contract';
-import { readDocument } from '../../../shared/plan/upgrade';
 import { CommentEntity, CommentVersionEntity } from '../../db/entities/talk';
 import { PersonEntity } from '../../db/entities/person';
-import { type PlanEntity, type RevisionEntity } from '../../db/entities/plan';
+import { type PlanEntity } from '../../db/entities/plan';
 import { type Deps } from '../../deps';
 import { ApiError, missing } from '../../http/errors';
+import { frozenRevision, type FrozenRevision } from '../plans/frozen';
 import { canSeePlan, canTalkOn } from '../plans/plans.policy';
-import { findPlan, findRevision } from '../plans/plans.repository';
+import { findPlan } from '../plans/plans.repository';
 import { canDelete, canEdit, canSettle } from './talk.policy';
 import { presentComment } from './talk.presenter';
 
@@ -123,11 +123,11 @@ export async function listThreads(
 
 function requireAnchor(
   body: Exclude<CommentBody, { kind: 'answer' }>,
-  revision: RevisionEntity,
+  revision: FrozenRevision,
 ): void {
   const { on, elementId } = body.anchor;
   if (on === 'plan') return;
-  const document = readDocument(revision.document);
+  const { document } = revision;
   const list =
     on === 'step' ? document.steps : on === 'part' ? document.parts : document.dimensions;
   if (!list.some((element) => element.id === elementId)) {
@@ -151,7 +151,7 @@ async function anchorFor(
   deps: Deps,
   body: CommentBody,
   plan: PlanEntity,
-  revision: RevisionEntity,
+  revision: FrozenRevision,
 ): Promise<Pick<CommentEntity, 'anchorOn' | 'anchorElementId' | 'parentId'>> {
   if (body.kind !== 'answer') {
     requireAnchor(body, revision);
@@ -188,7 +188,7 @@ export async function post(
     return presentOne(deps, known, plan, person);
   }
   const revision = plan.currentRevisionId
-    ? await findRevision(deps.db, plan.currentRevisionId)
+    ? await frozenRevision(deps.db, plan.currentRevisionId)
     : null;
   if (!revision || !canTalkOn(person, plan))
     throw new ApiError(
@@ -200,7 +200,7 @@ export async function post(
     comments.create({
       id: body.id,
       planId,
-      letter: revision.letter,
+      letter: revision.row.letter,
       kind: body.kind,
       ...place,
       stance: body.kind === 'critique' ? body.stance : null,
