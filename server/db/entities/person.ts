@@ -12,7 +12,7 @@ export class PersonEntity {
   @Column({ name: 'shop_name', type: 'text', nullable: true }) shopName!: string | null;
   @Column({ name: 'password_hash', type: 'text' }) passwordHash!: string;
   @Column({ type: 'text', array: true }) roles!: Role[];
-  @Column({ type: 'jsonb' }) preferences!: Partial<Preferences>;
+  @Column({ type: 'jsonb', default: {} }) preferences!: Partial<Preferences>;
   @Column({ name: 'suspended_until', type: 'timestamptz', nullable: true })
   suspendedUntil!: Date | null;
   @Column({ name: 'suspended_for', type: 'text', nullable: true }) suspendedFor!: string | null;
