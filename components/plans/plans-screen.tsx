@@ -1,14 +1,15 @@
 import { useDeferredValue, useState } from 'react';
-import { View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 import { tell } from '../data/problems';
 import { PageHead } from '../shell/page-head';
 import { Button } from '../ui/button';
-import { Page, Row } from '../ui/layout';
+import { Page } from '../ui/layout';
 import { Select } from '../ui/select';
 import { EmptyState, ErrorState, LoadingLines } from '../ui/states';
 import { Text } from '../ui/text';
 import { TextField } from '../ui/text-field';
 import { PlanRow } from './plan-row';
+import { webStyle } from '../ui/web-style';
 import { usePlans, type PlanFilter } from './plan-queries';
 
 const start: PlanFilter = { q: '', sort: 'newest' };
@@ -58,7 +59,7 @@ export function PlansScreen() {
           onChange={(q) => set({ q })}
           help="A word of the title, a part, a tool"
         />
-        <Row gap={12} wrap align="flex-end">
+        <View style={styles.filters}>
           <Select
             label="Time with waits"
             options={times}
@@ -83,7 +84,7 @@ export function PlansScreen() {
             value={filter.sort}
             onChange={(sort) => set({ sort })}
           />
-        </Row>
+        </View>
         {plans.isError ? (
           <ErrorState
             title="The plans did not come"
@@ -122,3 +123,11 @@ export function PlansScreen() {
     </>
   );
 }
+
+const styles = StyleSheet.create({
+  filters: webStyle({
+    display: 'grid',
+    gridTemplateColumns: 'repeat(auto-fill, minmax(150px, 1fr))',
+    gap: '12px',
+  }),
+});
