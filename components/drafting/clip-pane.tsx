@@ -5,6 +5,7 @@ import { limits } from '../../shared/api/limits';
 import { jot, readCaptions, toDraft } from '../../shared/captions';
 import { Rational } from '../../shared/measure';
 import { stepSchema, type PlanDocument } from '../../shared/plan/document';
+import { clockTime } from '../../shared/plan/stick/spoken';
 import { upload } from '../data/api-client';
 import { tell } from '../data/problems';
 import { ClipPlayer } from '../plans/clip-player';
@@ -16,6 +17,7 @@ import { Row, Section, Stack } from '../ui/layout';
 import { Progress } from '../ui/progress';
 import { Text } from '../ui/text';
 import { TextField } from '../ui/text-field';
+import { type ClipPlace } from './clip-place';
 import { type DraftEditor } from './use-draft-editor';
 
 const perUnit: Record<string, Rational> = {
@@ -50,7 +52,13 @@ export function stepsFromCaptions(text: string): PlanDocument['steps'] {
 }
 
 /** The clip and its captions: brought, watched, turned into steps. */
-export function ClipPane({ editor: { document, change } }: { editor: DraftEditor }) {
+export function ClipPane({
+  editor: { document, change },
+  place,
+}: {
+  editor: DraftEditor;
+  place: ClipPlace;
+}) {
   const [progress, setProgress] = useState<number | null>(null);
   const [trouble, setTrouble] = useState<string | null>(null);
   const [found, setFound] = useState<string | null>(null);
@@ -113,7 +121,12 @@ export function ClipPane({ editor: { document, change } }: { editor: DraftEditor
       {clip.source === 'none' ? (
         <Text tone="ink2">Bring a clip, or the address of a video hosted elsewhere.</Text>
       ) : (
-        <ClipPlayer clip={clip} label="Clip of the draft" />
+        <ClipPlayer clip={clip} seek={place.seek} onTime={place.setNow} label="Clip of the draft" />
+      )}
+      {clip.source === 'none' ? null : (
+        <Text mono>
+          {clockTime(place.now)} of {clockTime(clip.duration)}
+        </Text>
       )}
       {progress === null ? null : (
         <Progress label={`Uploading, ${Math.round(progress * 100)} per cent`} value={progress} />

@@ -1,5 +1,6 @@
 import { useLocalSearchParams } from 'expo-router';
 import { useEffect, useState } from 'react';
+import { View } from 'react-native';
 import { type Draft } from '../../shared/api/plans';
 import { SignedIn } from '../account/signed-in';
 import { readLocal, dropLocal } from '../data/kept-draft';
@@ -7,13 +8,15 @@ import { ApiProblem, tell } from '../data/problems';
 import { PageHead } from '../shell/page-head';
 import { Banner } from '../ui/banner';
 import { Dialog } from '../ui/dialog';
-import { Page } from '../ui/layout';
+import { Page, Stack, WorkPanes } from '../ui/layout';
 import { ErrorState, LoadingLines } from '../ui/states';
 import { TabPanel, Tabs } from '../ui/tabs';
 import { Text } from '../ui/text';
 import { useMounted } from '../ui/use-media';
 import { AboutPane } from './about-pane';
+import { CaptionsList, useCues } from './captions-list';
 import { ClipPane } from './clip-pane';
+import { useClipPlace } from './clip-place';
 import { useDraft } from './drafting-queries';
 import {
   dimensionFields,
@@ -124,12 +127,7 @@ function Editing({ draft }: { draft: Draft }) {
           fill={false}
         />
         <TabPanel id="draft" value={tab}>
-          {tab === 'steps' ? (
-            <>
-              <ClipPane editor={editor} />
-              <StepsPane editor={editor} />
-            </>
-          ) : null}
+          {tab === 'steps' ? <StepsTab editor={editor} /> : null}
           {tab === 'dimensions' ? (
             <ListEditor
               title="Dimensions"
@@ -167,6 +165,41 @@ function Editing({ draft }: { draft: Draft }) {
         </Text>
       </Dialog>
     </>
+  );
+}
+
+/** Clip and captions at the left, the steps on the stick, the check sheet: three panes at a desk. */
+function StepsTab({ editor }: { editor: DraftEditor }) {
+  const place = useClipPlace();
+  const { clip } = editor.document;
+  const hash = clip.source === 'none' ? undefined : clip.captions;
+  const { cues, missing } = useCues(hash);
+  return (
+    <WorkPanes
+      below={150}
+      panes={[
+        {
+          key: 'clip',
+          label: 'Clip and captions',
+          width: 400,
+          content: (
+            <Stack gap={16} style={{ padding: 4 }}>
+              <ClipPane editor={editor} place={place} />
+              {hash ? <CaptionsList cues={cues} missing={missing} place={place} /> : null}
+            </Stack>
+          ),
+        },
+        {
+          key: 'steps',
+          label: 'Steps',
+          content: (
+            <View style={{ padding: 4, paddingHorizontal: 12 }}>
+              <StepsPane editor={editor} place={place} cues={cues} />
+            </View>
+          ),
+        },
+      ]}
+    />
   );
 }
 

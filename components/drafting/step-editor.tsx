@@ -1,7 +1,8 @@
 import { useState } from 'react';
 import { v7 as uuid } from 'uuid';
 import { limits } from '../../shared/api/limits';
-import { type PlanDocument, type Step } from '../../shared/plan/document';
+import { type Heard, type PlanDocument, type Step } from '../../shared/plan/document';
+import { looseNames, shownText, storedText } from '../../shared/plan/references';
 import { clockTime } from '../../shared/plan/stick/spoken';
 import { Button } from '../ui/button';
 import { Checkbox } from '../ui/checkbox';
@@ -22,12 +23,19 @@ export function readClock(text: string): number | null {
 export interface StepEditorProps {
   step: Step;
   document: PlanDocument;
+  /** Where the clip is, seconds. */
+  now: number;
+  /** Sets the step's in or out to where the clip is. */
+  onMark: (which: 'start' | 'end', stepId: string) => void;
   onChange: (step: Step) => void;
+  /** Makes a dimension of a figure heard in the clip. */
+  onDimension: (heard: Heard) => void;
   onRemove: () => void;
 }
 
 /** One step's fields. */
-export function StepEditor({ step, document, onChange, onRemove }: StepEditorProps) {
+export function StepEditor(props: StepEditorProps) {
+  const { step, document, onChange, onRemove } = props;
   const set = (part: Partial<Step>) => onChange({ ...step, ...part });
   const wait = step.waits[0];
   return (
@@ -37,26 +45,11 @@ export function StepEditor({ step, document, onChange, onRemove }: StepEditorPro
         value={step.title}
         onChange={(title) => set({ title: title.slice(0, limits.title) })}
       />
-      <TextArea
-        label="What to do"
-        value={step.text}
-        onChange={(text) => set({ text: text.slice(0, limits.stepText) })}
-        limit={limits.stepText}
-        help="Markdown. {{dim:…}} and {{part:…}} are put in by the buttons below."
+      <Words {...props} />
+      <Stretch
+        key={`${step.stretches[0]?.start ?? ''}-${step.stretches[0]?.end ?? ''}`}
+        {...props}
       />
-      <Row gap={8} wrap>
-        {document.dimensions.map((d) => (
-          <Button
-            key={d.id}
-            size="small"
-            label={`Put ${d.symbol} into the text`}
-            onPress={() => set({ text: `${step.text} {{dim:${d.id}}}`.trim() })}
-          >
-            {d.symbol}
-          </Button>
-        ))}
-      </Row>
-      <Stretch step={step} onChange={onChange} />
       <TextField
         label="Hands on, minutes"
         inputMode="decimal"
@@ -102,15 +95,53 @@ export function StepEditor({ step, document, onChange, onRemove }: StepEditorPro
         }
       />
       <MadeHere step={step} document={document} set={set} />
-      {step.heard.length > 0 ? (
-        <Text tone="ink2">
-          Heard in the clip: {step.heard.map((h) => `“${h.words}”`).join(', ')}
-        </Text>
-      ) : null}
+      <HeardList {...props} />
       <Row>
         <Button kind="danger" size="small" label="Take the step out" onPress={onRemove} />
       </Row>
     </Stack>
+  );
+}
+
+/** The text, with references shown by symbol and mark, and buttons that put them in. */
+function Words({ step, document, onChange }: StepEditorProps) {
+  const text = shownText(step.text, document);
+  const loose = looseNames(storedText(text, document));
+  const put = (words: string) =>
+    onChange({ ...step, text: storedText(words, document).slice(0, limits.stepText) });
+  return (
+    <>
+      <TextArea
+        label="What to do"
+        value={text}
+        onChange={put}
+        limit={limits.stepText}
+        help="Markdown. Figures and parts go in by the buttons below, so that they follow the plan."
+        error={loose.length > 0 ? `Nothing is called ${loose.join(', ')}.` : undefined}
+      />
+      <Row gap={8} wrap>
+        {document.dimensions.map((d) => (
+          <Button
+            key={d.id}
+            size="small"
+            label={`Put ${d.symbol} into the text`}
+            onPress={() => put(`${text} {{${d.symbol}}}`.trim())}
+          >
+            {d.symbol}
+          </Button>
+        ))}
+        {document.parts.map((part) => (
+          <Button
+            key={part.id}
+            size="small"
+            label={`Put part ${part.mark} into the text`}
+            onPress={() => put(`${text} {{part ${part.mark}}}`.trim())}
+          >
+            {part.mark}
+          </Button>
+        ))}
+      </Row>
+    </>
   );
 }
 
@@ -162,7 +193,57 @@ function MadeHere({ step, document, set }: MadeHereProps) {
   );
 }
 
-function Stretch({ step, onChange }: Pick<StepEditorProps, 'step' | 'onChange'>) {
+/** Figures heard in the stretch: make one a dimension, or say how the bench treats it. */
+function HeardList({ step, document, onChange, onDimension }: StepEditorProps) {
+  if (step.heard.length === 0) return null;
+  const rule = (heard: Heard, ruling: Heard['ruling']) =>
+    onChange({ ...step, heard: step.heard.map((h) => (h.id === heard.id ? { ...h, ruling } : h)) });
+  return (
+    <Stack gap={8}>
+      <Text weight={600}>Heard in the clip</Text>
+      {step.heard.map((heard) => {
+        const dimension = document.dimensions.find((d) => d.id === heard.dimensionId);
+        return (
+          <Row key={heard.id} gap={8} wrap>
+            <Text size="note">
+              {clockTime(heard.at)} “{heard.words}”{dimension ? ` is ${dimension.symbol}` : ''}
+            </Text>
+            {dimension ? (
+              <Button
+                size="small"
+                label={
+                  heard.ruling === 'say' ? `Mute “${heard.words}”` : `Say “${heard.words}” again`
+                }
+                onPress={() => rule(heard, heard.ruling === 'say' ? 'muted' : 'say')}
+              >
+                {heard.ruling === 'say' ? 'Mute' : 'Say again'}
+              </Button>
+            ) : (
+              <Button
+                size="small"
+                label={`Make “${heard.words}” a dimension`}
+                onPress={() => onDimension(heard)}
+              >
+                Make it a dimension
+              </Button>
+            )}
+            <Button
+              size="small"
+              label={`Drop “${heard.words}”`}
+              onPress={() =>
+                onChange({ ...step, heard: step.heard.filter((h) => h.id !== heard.id) })
+              }
+            >
+              Drop
+            </Button>
+          </Row>
+        );
+      })}
+    </Stack>
+  );
+}
+
+function Stretch({ step, now, onMark, onChange }: StepEditorProps) {
   const stretch = step.stretches[0];
   const [from, setFrom] = useState(stretch ? clockTime(stretch.start) : '');
   const [to, setTo] = useState(stretch ? clockTime(stretch.end) : '');
@@ -195,6 +276,18 @@ function Stretch({ step, onChange }: Pick<StepEditorProps, 'step' | 'onChange'>)
           setTo(text);
           keep(from, text);
         }}
+      />
+      <Button
+        size="small"
+        icon="markin"
+        label={`In at ${clockTime(now)}`}
+        onPress={() => onMark('start', step.id)}
+      />
+      <Button
+        size="small"
+        icon="markout"
+        label={`Out at ${clockTime(now)}`}
+        onPress={() => onMark('end', step.id)}
       />
     </Row>
   );

@@ -1,7 +1,7 @@
 import { useMemo, useState } from 'react';
 import { View } from 'react-native';
-import { v7 as uuid } from 'uuid';
-import { stepSchema, type Step } from '../../shared/plan/document';
+import { type Cue } from '../../shared/captions';
+import { type Step } from '../../shared/plan/document';
 import { clockTime } from '../../shared/plan/stick/spoken';
 import { stickOf } from '../plans/plan-stick-input';
 import { StoryStick } from '../story-stick/story-stick';
@@ -12,35 +12,30 @@ import { IconButton } from '../ui/icon-button';
 import { Row, Rule, Section, Stack } from '../ui/layout';
 import { EmptyState } from '../ui/states';
 import { Text } from '../ui/text';
+import { type ClipPlace } from './clip-place';
+import { DragHandle, DropPlace } from './drag-order';
 import { StepEditor } from './step-editor';
+import { useStepEdits } from './use-step-edits';
+import { withDimension } from './with-dimension';
 import { type DraftEditor } from './use-draft-editor';
 
+export interface StepsPaneProps {
+  editor: DraftEditor;
+  place: ClipPlace;
+  cues: readonly Cue[];
+}
+
 /** The steps on the stick and below each other; order by buttons, by Alt with arrows, by dragging. */
-export function StepsPane({ editor: { document, change } }: { editor: DraftEditor }) {
+export function StepsPane({ editor, place, cues }: StepsPaneProps) {
+  const { document, change } = editor;
   const [open, setOpen] = useState<string | null>(null);
   const stick = useMemo(() => stickOf(document, {}), [document]);
-  const setSteps = (fn: (steps: Step[]) => Step[]) => change((d) => ({ ...d, steps: fn(d.steps) }));
-  const replace = (step: Step) =>
-    setSteps((steps) => steps.map((s) => (s.id === step.id ? step : s)));
-  const move = (id: string, by: number) =>
-    setSteps((steps) => {
-      const at = steps.findIndex((s) => s.id === id);
-      const to = Math.max(0, Math.min(steps.length - 1, at + by));
-      const next = steps.filter((s) => s.id !== id);
-      next.splice(to, 0, steps[at]!);
-      return next;
-    });
-  const start = (id: string, at: number) =>
-    setSteps((steps) =>
-      steps.map((s) =>
-        s.id === id
-          ? {
-              ...s,
-              stretches: [{ start: at, end: Math.max(at + 0.1, s.stretches[0]?.end ?? at + 10) }],
-            }
-          : s,
-      ),
-    );
+  const { setSteps, replace, move, moveTo, mark, start, add } = useStepEdits(
+    editor,
+    place,
+    open,
+    setOpen,
+  );
   const remove = (step: Step) => {
     const before = document.steps;
     setSteps((steps) => steps.filter((s) => s.id !== step.id));
@@ -48,11 +43,6 @@ export function StepsPane({ editor: { document, change } }: { editor: DraftEdito
       text: `“${step.title}” is out.`,
       action: { label: 'Put it back', onPress: () => change((d) => ({ ...d, steps: before })) },
     });
-  };
-  const add = () => {
-    const step = stepSchema.parse({ id: uuid(), title: '' });
-    setSteps((steps) => [...steps, step]);
-    setOpen(step.id);
   };
   return (
     <Section>
@@ -63,10 +53,23 @@ export function StepsPane({ editor: { document, change } }: { editor: DraftEdito
         <StoryStick
           input={stick}
           label="Story stick of the draft"
-          onStep={setOpen}
+          onStep={(id) => {
+            setOpen(id);
+            const at = document.steps.find((s) => s.id === id)?.stretches[0]?.start;
+            if (at !== undefined) place.goTo(at);
+          }}
           onOpen={setOpen}
           selected={open ?? undefined}
-          drafting={{ captionStarts: [], onMoveMark: start, onMoveStep: move }}
+          now={place.now}
+          onSeek={place.goTo}
+          drafting={{
+            captionStarts: cues.map((cue) => cue.start),
+            onMoveMark: start,
+            onMoveStep: move,
+            onMarkIn: () => mark('start'),
+            onMarkOut: () => mark('end'),
+            onNewStep: add,
+          }}
         />
       ) : (
         <EmptyState title="No steps yet" level={3}>
@@ -76,29 +79,34 @@ export function StepsPane({ editor: { document, change } }: { editor: DraftEdito
       <View role="list" aria-label="Steps">
         {document.steps.map((step, i) => (
           <View key={step.id} role="listitem">
-            <Stack gap={12} style={{ paddingVertical: 8 }}>
-              <StepLine
-                step={step}
-                number={i + 1}
-                open={open === step.id}
-                onMove={(by) => move(step.id, by)}
-                onOpen={() => setOpen(open === step.id ? null : step.id)}
-              />
-              {open === step.id ? (
-                <StepEditor
+            <DropPlace onDrop={(id) => moveTo(id, i)}>
+              <Stack gap={12} style={{ paddingVertical: 8 }}>
+                <StepLine
                   step={step}
-                  document={document}
-                  onChange={replace}
-                  onRemove={() => remove(step)}
+                  number={i + 1}
+                  open={open === step.id}
+                  onMove={(by) => move(step.id, by)}
+                  onOpen={() => setOpen(open === step.id ? null : step.id)}
                 />
-              ) : null}
-            </Stack>
+                {open === step.id ? (
+                  <StepEditor
+                    step={step}
+                    document={document}
+                    now={place.now}
+                    onMark={mark}
+                    onChange={replace}
+                    onDimension={(heard) => change((d) => withDimension(d, step.id, heard))}
+                    onRemove={() => remove(step)}
+                  />
+                ) : null}
+              </Stack>
+            </DropPlace>
             <Rule />
           </View>
         ))}
       </View>
       <Row>
-        <Button icon="add" label="Add a step" onPress={add} />
+        <Button icon="add" label={`Add a step at ${clockTime(place.now)}`} onPress={add} />
       </Row>
     </Section>
   );
@@ -116,6 +124,7 @@ interface StepLineProps {
 function StepLine({ step, number, open, onMove, onOpen }: StepLineProps) {
   return (
     <Row gap={8} justify="space-between">
+      <DragHandle id={step.id} label={`Drag step ${number}`} />
       <Text style={{ flex: 1 }} weight={600}>
         {number}. {step.title || 'a new step'}{' '}
         <Text tone="ink2" weight={400}>
