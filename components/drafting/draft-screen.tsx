@@ -1,7 +1,10 @@
 import { useLocalSearchParams } from 'expo-router';
-import { useEffect, useState } from 'react';
+import { useEffect, useMemo, useState } from 'react';
 import { View } from 'react-native';
 import { type Draft } from '../../shared/api/plans';
+import { type Dimension, type PlanDocument } from '../../shared/plan/document';
+import { createModel } from '../../shared/plan/model';
+import { renameSymbol } from '../../shared/plan/rename';
 import { SignedIn } from '../account/signed-in';
 import { readLocal, dropLocal } from '../data/kept-draft';
 import { ApiProblem, tell } from '../data/problems';
@@ -19,6 +22,9 @@ import { ClipPane } from './clip-pane';
 import { useClipPlace } from './clip-place';
 import { useDraft } from './drafting-queries';
 import {
+  checkFields,
+  consumableFields,
+  creditFields,
   dimensionFields,
   hardwareFields,
   linkFields,
@@ -107,7 +113,11 @@ function Editing({ draft }: { draft: Draft }) {
   const { document, change, kept } = editor;
   const [tab, setTab] = useState<Tab>('steps');
   useRestore(draft, editor);
-  const list = <K extends 'dimensions' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links'>(
+  const model = useMemo(() => createModel(document), [document]);
+  const list = <
+    K extends
+      'checks' | 'consumables' | 'credits' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links',
+  >(
     key: K,
   ) => ({
     items: document[key],
@@ -129,23 +139,33 @@ function Editing({ draft }: { draft: Draft }) {
         <TabPanel id="draft" value={tab}>
           {tab === 'steps' ? <StepsTab editor={editor} /> : null}
           {tab === 'dimensions' ? (
-            <ListEditor
-              title="Dimensions"
-              fields={dimensionFields(document)}
-              {...list('dimensions')}
-            />
+            <>
+              <ListEditor
+                title="Dimensions"
+                fields={dimensionFields(document, model)}
+                items={document.dimensions}
+                onChange={(dimensions) => change((d) => withDimensions(d, dimensions))}
+              />
+              <ListEditor title="Checks" fields={checkFields(model)} {...list('checks')} />
+            </>
           ) : null}
           {tab === 'parts' ? (
             <>
               <ListEditor title="Parts" fields={partFields(document)} {...list('parts')} />
               <ListEditor title="Stock" fields={stockFields(document)} {...list('stock')} />
               <ListEditor title="Hardware" fields={hardwareFields} {...list('hardware')} />
+              <ListEditor
+                title="Glue, finish, abrasives"
+                fields={consumableFields}
+                {...list('consumables')}
+              />
             </>
           ) : null}
           {tab === 'tools' ? (
             <>
               <ListEditor title="Tools" fields={toolFields} {...list('tools')} />
               <ListEditor title="Links" fields={linkFields} {...list('links')} />
+              <ListEditor title="Credits" fields={creditFields} {...list('credits')} />
             </>
           ) : null}
           {tab === 'about' ? <AboutPane editor={editor} /> : null}
@@ -166,6 +186,17 @@ function Editing({ draft }: { draft: Draft }) {
       </Dialog>
     </>
   );
+}
+
+/** A changed symbol is changed in every expression that uses it. */
+function withDimensions(document: PlanDocument, dimensions: Dimension[]): PlanDocument {
+  const before = new Map(document.dimensions.map((d) => [d.id, d.symbol]));
+  const changed = dimensions.find((d) => {
+    const known = before.get(d.id);
+    return known !== undefined && known !== d.symbol;
+  });
+  if (!changed) return { ...document, dimensions };
+  return renameSymbol(document, before.get(changed.id) ?? '', changed.symbol);
 }
 
 /** Clip and captions at the left, the steps on the stick, the check sheet: three panes at a desk. */

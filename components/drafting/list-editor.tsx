@@ -20,6 +20,9 @@ export interface ListField<T> {
   fault?: (text: string, item: T) => string | undefined;
   flag?: boolean;
   mono?: boolean;
+  /** Put only when the field is left or Enter is pressed, and only without a fault. */
+  lazy?: boolean;
+  help?: string;
 }
 
 export interface ListFields<T> {
@@ -125,12 +128,42 @@ function OneField<T>({
     );
   if (field.options)
     return <Select label={field.label} options={field.options} value={value} onChange={put} />;
+  if (field.lazy)
+    return <LazyField key={value} field={field} item={item} start={value} put={put} />;
   return (
     <TextField
       label={field.label}
+      help={field.help}
       value={value}
       onChange={put}
       error={field.fault?.(value, item)}
+      mono={field.mono}
+    />
+  );
+}
+
+interface LazyFieldProps<T> {
+  field: ListField<T>;
+  item: T;
+  start: string;
+  put: (text: string) => void;
+}
+
+/** A name others depend on: typed to the end before it takes effect. */
+function LazyField<T>({ field, item, start, put }: LazyFieldProps<T>) {
+  const [text, setText] = useState(start);
+  const fault = field.fault?.(text, item);
+  const keep = () => {
+    if (!fault && text !== start) put(text);
+  };
+  return (
+    <TextField
+      label={field.label}
+      value={text}
+      onChange={setText}
+      onBlur={keep}
+      onEnter={keep}
+      error={fault}
       mono={field.mono}
     />
   );

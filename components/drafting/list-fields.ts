@@ -1,4 +1,10 @@
-import { parseExpression, parseLength } from '../../shared/measure';
+import {
+  displayMm,
+  parseCheck,
+  parseExpression,
+  parseLength,
+  reservedWords,
+} from '../../shared/measure';
 import {
   disclosures,
   grains,
@@ -13,6 +19,12 @@ import {
   symbolPattern,
   toolSchema,
   dimensionSchema,
+  checkSchema,
+  consumableSchema,
+  creditSchema,
+  type Check,
+  type Consumable,
+  type Credit,
   type Dimension,
   type Hardware,
   type Part,
@@ -21,6 +33,7 @@ import {
   type Stock,
   type Tool,
 } from '../../shared/plan/document';
+import { type PlanModel, verdictWord } from '../../shared/plan/model';
 import { nextLetter } from '../../shared/plan/facts';
 import { type ListField, type ListFields } from './list-editor';
 
@@ -63,7 +76,28 @@ const expressionFault = (document: PlanDocument) => (value: string) => {
 const optionalFault = (document: PlanDocument) => (value: string) =>
   value.trim() === '' ? undefined : expressionFault(document)(value);
 
-export const dimensionFields = (document: PlanDocument): ListFields<Dimension> => ({
+/** A dimension while it is closed: symbol, expression, value and worst case, or what is wrong. */
+function dimensionLine(d: Dimension, document: PlanDocument, model: PlanModel): string {
+  const state = model.dimensions.get(d.id);
+  const said = `${d.symbol} = ${d.expression}`;
+  if (state?.error) return `${said}: ${state.error.message}`;
+  if (!state?.value || state.kind !== 'length') return said;
+  const shown = displayMm(state.value.x, {
+    system: document.units,
+    instrument: 'calipers',
+    grid: 64,
+  });
+  const worst =
+    state.value.worst > 1e-9
+      ? `, worst ± ${displayMm(state.value.worst, { system: document.units, instrument: 'calipers', grid: 64 }).text}`
+      : '';
+  return d.origin === 'derived' ? `${said} = ${shown.text}${worst}` : `${said}${worst}`;
+}
+
+export const dimensionFields = (
+  document: PlanDocument,
+  model: PlanModel,
+): ListFields<Dimension> => ({
   make: (id, n) =>
     dimensionSchema.parse({
       id,
@@ -72,13 +106,18 @@ export const dimensionFields = (document: PlanDocument): ListFields<Dimension> =
       origin: 'given',
       expression: '',
     }),
-  name: (d) => `${d.symbol} = ${d.expression}`,
+  name: (d) => dimensionLine(d, document, model),
   fields: [
     text('name', 'Name'),
     text('symbol', 'Symbol', {
       mono: true,
-      fault: (v) =>
-        symbolPattern.test(v) ? undefined : 'A letter first, then letters, digits and _.',
+      lazy: true,
+      fault: (v, d) => {
+        if (!symbolPattern.test(v)) return 'A letter first, then letters, digits and _.';
+        if (reservedWords.has(v)) return `${v} is a word of the expressions. Choose another.`;
+        const other = document.dimensions.find((x) => x.symbol === v && x.id !== d.id);
+        return other ? `${other.name} has this symbol already.` : undefined;
+      },
     }),
     choice('origin', 'Origin', origins),
     text('expression', 'Value or expression', { mono: true, fault: expressionFault(document) }),
@@ -247,5 +286,57 @@ export const linkFields: ListFields<PlanLink> = {
         disclosure: v === 'unsaid' ? undefined : (v as PlanLink['disclosure']),
       }),
     },
+  ],
+};
+
+export const checkFields = (model: PlanModel): ListFields<Check> => ({
+  make: (id) => checkSchema.parse({ id, name: '', expression: '' }),
+  name: (c) => {
+    const state = model.checks.get(c.id);
+    return state ? `${c.name}: ${verdictWord(state)}` : c.name;
+  },
+  fields: [
+    text('name', 'What must be true, in a few words'),
+    text('expression', 'As a statement', {
+      mono: true,
+      help: 'left < right · left = right within 1 mm · between(x, low, high) · fit(inner, outer, from, to)',
+      fault: (value, check) => {
+        if (value.trim() === '') return 'Say it as a statement.';
+        const parsed = parseCheck(value);
+        if (!parsed.ok)
+          return `Column ${parsed.fault.at + 1}: ${parsed.fault.message} ${parsed.fault.cure ?? ''}`.trim();
+        const error = model.checks.get(check.id)?.error;
+        return error
+          ? `Column ${error.at + 1}: ${error.message} ${error.cure ?? ''}`.trim()
+          : undefined;
+      },
+    }),
+    text('why', 'Why'),
+    choice('level', 'Weight', ['must', 'should']),
+    choice('asked', 'Asked', ['design', 'bench', 'both']),
+    text('how', 'For a trial or a look: what to do'),
+  ],
+});
+
+export const consumableFields: ListFields<Consumable> = {
+  make: (id) => consumableSchema.parse({ id, kind: 'glue', name: '' }),
+  name: (c) => c.name,
+  fields: [
+    text('name', 'Name'),
+    choice('kind', 'Kind', ['glue', 'finish', 'abrasive', 'other']),
+    text('amount', 'How much'),
+    text('note', 'As its label says'),
+  ],
+};
+
+export const creditFields: ListFields<Credit> = {
+  make: (id) => creditSchema.parse({ id, text: '' }),
+  name: (c) => c.text,
+  fields: [
+    text('text', 'Whose method or design it builds on'),
+    text('url', 'Address', {
+      fault: (v) =>
+        v === '' || /^https?:\/\/\S+\.\S+/.test(v) ? undefined : 'An address begins with https://',
+    }),
   ],
 };
