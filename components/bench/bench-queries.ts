@@ -15,7 +15,7 @@ import { type Entry } from '../../shared/plan/bench/entry';
 import { foldEntries, type BenchState } from '../../shared/plan/bench/fold';
 import { call } from '../data/api-client';
 import { keepEntry, nextDeviceMark } from '../data/outbox';
-import { useOutbox } from '../data/outbox-hooks';
+import { useHeldEntries } from '../data/outbox-hooks';
 import { keys, staleTimes } from '../data/query-client';
 
 /** One's bench copies; kept for offline. */
@@ -59,14 +59,14 @@ export function useRemoveCopy() {
 
 /** The state of a copy now: what the server has and what still waits on this device. */
 export function useBenchState(copy: BenchCopy): BenchState {
-  const waiting = useOutbox(copy.id);
+  const held = useHeldEntries(copy.id);
   return useMemo(
     () =>
       foldEntries([
         ...copy.entries.map(({ entry, sequence }) => ({ entry, sequence })),
-        ...waiting.map((job) => ({ entry: job.entry, sequence: null })),
+        ...held.map((job) => ({ entry: job.entry, sequence: job.sequence ?? null })),
       ]),
-    [copy.entries, waiting],
+    [copy.entries, held],
   );
 }
 

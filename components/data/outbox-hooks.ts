@@ -1,29 +1,44 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useEffect, useMemo, useSyncExternalStore } from 'react';
 import { type BenchCopy } from '../../shared/api/bench';
-import { flushOutbox, outboxStore, type OutboxJob } from './outbox';
-import { keys } from './query-client';
+import { dropSent, flushOutbox, outboxStore, type OutboxJob } from './outbox';
+import { keptText, keys } from './query-client';
 import { useMe } from './me-queries';
 
 const none: readonly OutboxJob[] = [];
 const again = 20_000;
 
-/** All kept entries, or one bench copy's. */
+const useJobs = () => useSyncExternalStore(outboxStore.subscribe, outboxStore.snapshot, () => none);
+
+/** Entries that wait or were refused: all, or one bench copy's. */
 export function useOutbox(copyId?: string): readonly OutboxJob[] {
-  const all = useSyncExternalStore(outboxStore.subscribe, outboxStore.snapshot, () => none);
-  return useMemo(() => (copyId ? all.filter((job) => job.copyId === copyId) : all), [all, copyId]);
+  const all = useJobs();
+  return useMemo(
+    () => all.filter((job) => job.state !== 'sent' && (!copyId || job.copyId === copyId)),
+    [all, copyId],
+  );
+}
+
+/** Everything this device still holds of a bench copy, sent or not. */
+export function useHeldEntries(copyId: string): readonly OutboxJob[] {
+  const all = useJobs();
+  return useMemo(() => all.filter((job) => job.copyId === copyId), [all, copyId]);
 }
 
 /** Adds entries the server now has to the cached copy, so that nothing flickers before the next fetch. */
 export function withStored(copy: BenchCopy | undefined, job: OutboxJob): BenchCopy | undefined {
   if (!copy || copy.entries.some((e) => e.entry.id === job.entry.id)) return copy;
-  const last = copy.entries.reduce((max, e) => Math.max(max, e.sequence), 0);
-  const stored = { entry: job.entry, sequence: last + 1, receivedAt: new Date().toISOString() };
+  const stored = {
+    entry: job.entry,
+    sequence: job.sequence ?? 0,
+    receivedAt: new Date().toISOString(),
+  };
   return { ...copy, entries: [...copy.entries, stored] };
 }
 
 /** Sends what waits: at start, when the signal returns, when the page is looked at again, and by a timer. */
 export function useOutboxFlusher(): void {
+  useSentDropper();
   const { me } = useMe();
   const client = useQueryClient();
   const waiting = useOutbox().filter(
@@ -52,6 +67,17 @@ export function useOutboxFlusher(): void {
       document.removeEventListener('visibilitychange', seen);
     };
   }, [personId, waiting, client]);
+}
+
+/** Lets go of sent entries once the kept answers hold them. */
+function useSentDropper(): void {
+  const sent = useJobs().filter((job) => job.state === 'sent').length;
+  useEffect(() => {
+    if (sent === 0) return;
+    const drop = () => void keptText().then(dropSent);
+    const timer = setInterval(drop, 3000);
+    return () => clearInterval(timer);
+  }, [sent]);
 }
 
 const subscribeOnline = (listener: () => void) => {

@@ -10,7 +10,10 @@ export interface OutboxJob {
   /** Whose entry it is: a queue is never sent under another person's sign-in. */
   personId: string;
   entry: Entry;
-  state: 'waiting' | 'refused';
+  /** `sent`: the server has it, but the kept copy of the bench may not; it still counts on this device. */
+  state: 'waiting' | 'refused' | 'sent';
+  /** The server's sequence, once sent. */
+  sequence?: number;
   /** Why the server refused it, as a sentence, with its code. */
   reason?: string;
   code?: string;
@@ -107,11 +110,13 @@ async function flushLocked(
     const list = (await get<OutboxJob[]>(storeKey)) ?? [];
     const job = list.find((j) => j.personId === personId && j.state === 'waiting');
     if (!job) return { sent, stopped: 'no' };
+    let sequence: number;
     try {
-      await call(putEntry, {
+      const stored = await call(putEntry, {
         params: { copyId: job.copyId, entryId: job.entry.id },
         body: job.entry,
       });
+      sequence = stored.sequence;
     } catch (error) {
       if (passing(error)) return { sent, stopped: 'no-signal' };
       if (error instanceof ApiProblem && error.status === 401)
@@ -121,8 +126,12 @@ async function flushLocked(
       continue;
     }
     sent.push(job.entry.id);
-    onSent(job);
-    await dropEntries([job.entry.id]);
+    await change((all) =>
+      all.map((j) =>
+        j.entry.id === job.entry.id ? { ...j, state: 'sent' as const, sequence } : j,
+      ),
+    );
+    onSent({ ...job, state: 'sent', sequence });
   }
 }
 
@@ -135,6 +144,16 @@ export async function flushOutbox(
   return navigator.locks.request(lockName, { ifAvailable: true }, async (lock) =>
     lock ? flushLocked(personId, onSent) : { sent: [], stopped: 'no' as const },
   );
+}
+
+/**
+ * Lets go of sent entries that the kept answers hold as well: from then on a reload with no signal finds
+ * them there. `kept` is the text of what is kept.
+ */
+export async function dropSent(kept: string | undefined): Promise<void> {
+  const sent = ((await get<OutboxJob[]>(storeKey)) ?? []).filter((job) => job.state === 'sent');
+  const held = sent.filter((job) => kept?.includes(job.entry.id)).map((job) => job.entry.id);
+  if (held.length > 0) await dropEntries(held);
 }
 
 /** For tests and for signing out: everything kept for a person is cleared. */

@@ -58,8 +58,12 @@ export function makeQueryClient(): QueryClient {
   });
 }
 
+const keptKey = 'scantling-queries';
+/** The text of all kept answers. */
+export const keptText = (): Promise<string | undefined> => get<string>(keptKey);
+
 export const persister = createAsyncStoragePersister({
-  key: 'scantling-queries',
+  key: keptKey,
   throttleTime: 0,
   storage: {
     getItem: (key: string) => get<string>(key).then((v) => v ?? null),
