@@ -9,11 +9,15 @@ import { referencesOf } from '../plans/step-references';
 import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
 import { Icon } from '../ui/icon';
+import { useMe } from '../data/me-queries';
+import { usePreferences } from '../data/preferences';
 import { Row, Stack } from '../ui/layout';
+import { SegmentedControl } from '../ui/radio-group';
 import { Prose } from '../ui/prose';
 import { Text } from '../ui/text';
 import { TextArea } from '../ui/text-field';
 import { type NewEntry } from './bench-queries';
+import { CheckCard } from './check-card';
 import { ClipSays } from './clip-says';
 import { DimensionLineup } from './dimension-lineup';
 import { WaitTimer } from './wait-timer';
@@ -72,6 +76,11 @@ export function BenchStep(props: BenchStepProps) {
           taken={step.takes.includes(dimension.id)}
         />
       ))}
+      {copy.document.checks
+        .filter((check) => step.checks.includes(check.id))
+        .map((check) => (
+          <CheckCard key={check.id} check={check} state={state} values={values} add={add} />
+        ))}
       {step.waits.map((wait) => (
         <WaitTimer
           key={wait.id}
@@ -82,8 +91,26 @@ export function BenchStep(props: BenchStepProps) {
         />
       ))}
       {state.ticks.has(step.id) ? <Undo {...props} /> : null}
+      <Units />
       <Notes key={`notes-${step.id}`} {...props} />
     </Stack>
+  );
+}
+
+/** The units, switched where the work is. */
+function Units() {
+  const { me } = useMe();
+  const [{ units }, change] = usePreferences(me !== null);
+  return (
+    <SegmentedControl
+      label="Figures in"
+      options={[
+        { value: 'mm', label: 'millimetres' },
+        { value: 'in', label: 'inches' },
+      ]}
+      value={units}
+      onChange={(next) => change({ units: next })}
+    />
   );
 }
 

@@ -4,7 +4,8 @@ import { type BenchCopy } from '../../shared/api/bench';
 import { type Entry } from '../../shared/plan/bench/entry';
 import { type BenchState } from '../../shared/plan/bench/fold';
 import { instruments, type Dimension, type InstrumentName } from '../../shared/plan/document';
-import { toExact } from '../../shared/measure';
+import { displayMm, toExact } from '../../shared/measure';
+import { describeCoarse } from '../../shared/plan/model';
 import { type PlanValues } from '../plans/plan-model';
 import { Button } from '../ui/button';
 import { Figure } from '../ui/figure';
@@ -89,6 +90,10 @@ function OneReading({ dimension, state, values, add, choose, onDone }: OneReadin
   const wanted = values.figure(dimension.id);
   const verdict = judge(values, dimension.id);
   const unit = values.preference.system;
+  const coarse = verdict?.judged
+    ? describeCoarse(verdict.judged, { ...values.preference, instrument: 'calipers' })
+    : '';
+  const spread = values.model.dimensions.get(dimension.id)?.readings?.spread ?? null;
   const take = async () => {
     const read = toExact(text, unit);
     if (!read.ok) {
@@ -141,6 +146,37 @@ function OneReading({ dimension, state, values, add, choose, onDone }: OneReadin
         </Row>
       </Form>
       {readings.length > 0 && verdict ? <Said verdict={verdict} values={values} /> : null}
+      {coarse ? <Text size="lead">{coarse}</Text> : null}
+      {readings.length > 1 && spread !== null ? (
+        <Text size="lead">
+          Spread over {readings.length} places:{' '}
+          <Figure
+            figure={displayMm(spread, { ...values.preference, instrument: 'calipers' })}
+            weight={600}
+          />
+          . The{' '}
+          {dimension.counts === 'mean'
+            ? 'mean'
+            : dimension.counts === 'min'
+              ? 'smallest'
+              : 'largest'}{' '}
+          counts.
+        </Text>
+      ) : null}
+      <ReadingList dimension={dimension} readings={readings} add={add} />
+    </Stack>
+  );
+}
+
+interface ReadingListProps extends Pick<ReadingPanelProps, 'add'> {
+  dimension: Dimension;
+  readings: readonly { id: string; value: { text: string }; instrument: InstrumentName }[];
+}
+
+/** What was read so far; each can be taken back. */
+function ReadingList({ dimension, readings, add }: ReadingListProps) {
+  return (
+    <>
       {readings.map((reading, i) => (
         <Row key={reading.id} gap={12} justify="space-between" wrap>
           <Text size="lead">
@@ -160,6 +196,6 @@ function OneReading({ dimension, state, values, add, choose, onDone }: OneReadin
           </View>
         </Row>
       ))}
-    </Stack>
+    </>
   );
 }

@@ -62,7 +62,13 @@ export interface PlanRows extends Omit<
 > {
   key: string;
   dimensions: DimensionRow[];
-  checks?: [name: string, expression: string, why: string, level?: 'must' | 'should'][];
+  checks?: [
+    name: string,
+    expression: string,
+    why: string,
+    level?: 'must' | 'should',
+    more?: Partial<Omit<NonNullable<Input['checks']>[number], 'id'>>,
+  ][];
   stock: (Omit<NonNullable<Input['stock']>[number], 'id' | 'sizes'> & {
     key: string;
     sizes: { length: string; width?: string; price?: number }[];
@@ -180,12 +186,13 @@ function buildLists(rows: PlanRows, id: Id) {
       tolerance: by === '' ? { form: 'none' as const } : { form: 'plus-minus' as const, by },
       ...more,
     })),
-    checks: (rows.checks ?? []).map(([name, expression, why, level]) => ({
+    checks: (rows.checks ?? []).map(([name, expression, why, level, more]) => ({
       id: id('check', name),
       name,
       expression,
       why,
       level: level ?? ('must' as const),
+      ...more,
     })),
     stock: keyed('stock', rows.stock).map((item) => ({
       ...item,

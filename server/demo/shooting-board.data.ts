@@ -78,6 +78,11 @@ export const shootingBoard: PlanRows = {
       'Plane runs free',
       'plane_body < runway',
       'The plane must not touch the bed and the edge together.',
+      'must',
+      {
+        answeredBy: ['figures', 'trial'],
+        how: 'Set the plane on its side in the runway and push it end to end.',
+      },
     ],
     [
       'Fence is held',

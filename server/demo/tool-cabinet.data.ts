@@ -99,7 +99,16 @@ export const toolCabinet: PlanRows = {
       'inner_w + 2 * sheet_t = width within 1 mm',
       'Two sides and the inside make the outside width.',
     ],
-    ['Back slides in its groove', 'back_t < groove_w', 'A back that is forced bows the sides.'],
+    [
+      'Back slides in its groove',
+      'back_t < groove_w',
+      'A back that is forced bows the sides.',
+      'must',
+      {
+        answeredBy: ['figures', 'trial'],
+        how: 'Slide the back panel along the groove of the test piece.',
+      },
+    ],
     [
       'Doors never touch',
       'width - 2 * door_w - 2 * door_gap > 1 mm',
