@@ -307,7 +307,15 @@ export const outfeedCart: PlanRows = {
       tools: ['drill'],
       holds: ['frame_w'],
       actions: [
-        { do: 'fasten', screw: 'screw', quantity: 16, through: 'B', into: 'D', pilot: '1/8 in' },
+        {
+          do: 'fasten',
+          screw: 'screw',
+          quantity: 16,
+          through: 'B',
+          into: 'D',
+          intoThickness: 'rail_s',
+          pilot: '1/8 in',
+        },
       ],
     },
     {
@@ -322,7 +330,15 @@ export const outfeedCart: PlanRows = {
       holds: ['frame_l'],
       checks: ['Frame stands inside the top'],
       actions: [
-        { do: 'fasten', screw: 'screw', quantity: 16, through: 'B', into: 'C', pilot: '1/8 in' },
+        {
+          do: 'fasten',
+          screw: 'screw',
+          quantity: 16,
+          through: 'B',
+          into: 'C',
+          intoThickness: 'rail_l',
+          pilot: '1/8 in',
+        },
       ],
     },
     {

@@ -410,6 +410,7 @@ export const toolCabinet: PlanRows = {
           quantity: 12,
           through: 'A',
           into: 'B',
+          intoThickness: 'inner_w',
           pilot: '3 mm',
           countersink: true,
         },

@@ -25,8 +25,8 @@ describe('the check sheet', () => {
 
   const planted: [rule: string, document: PlanDocument][] = [
     ['dims/unknown', dimension('bed_w', { expression: 'base_w - runwy' })],
-    ['dims/unknown', dimension('runway', { expression: 'bed_w + play' })],
-    ['dims/unknown', dimension('bed_w', { expression: 'base_w - 3' })],
+    ['dims/loop', dimension('runway', { expression: 'bed_w + play' })],
+    ['dims/kind', dimension('bed_w', { expression: 'base_w - 3' })],
     ['dims/untaken', step(0, { takes: [] })],
     [
       'dims/unused',

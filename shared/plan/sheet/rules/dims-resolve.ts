@@ -1,37 +1,54 @@
-import { type Finding, type Rule } from '../rule';
+import { type ModelFault } from '../../model';
+import { type Finding, type Rule, type RuleContext } from '../rule';
 
-/** Expressions resolve, do not run in circles, and their kinds agree: dims/unknown, dims/loop, dims/kind. */
-export const dimsResolve: Rule = {
-  id: 'dims/unknown',
-  level: 'must',
-  source: 'plan model §2: an expression has a value, or the plan cannot be cut to',
-  run: ({ document, model }) => {
-    const worked = model();
-    const dimensions = document.dimensions.flatMap((dimension): Finding[] => {
-      const error = worked.dimensions.get(dimension.id)?.error;
-      return error
-        ? [
-            {
-              place: { in: 'dimensions', elementId: dimension.id },
-              message: `${dimension.name}: ${error.message}`,
-              cure: error.cure ?? 'Mend its expression.',
-            },
-          ]
-        : [];
-    });
-    const parts = document.parts.flatMap((part): Finding[] => {
+/** Which of the three rules a fault of an expression belongs to. */
+export function ruleOf(fault: ModelFault): 'dims/loop' | 'dims/kind' | 'dims/unknown' {
+  if (fault.loop) return 'dims/loop';
+  return /kind/.test(fault.code) ? 'dims/kind' : 'dims/unknown';
+}
+
+/** Faults that only follow from another dimension's are not told again. */
+const follows = (fault: ModelFault): boolean =>
+  fault.code === 'input' || /^Mend /.test(fault.cure ?? '');
+
+function faults({ document, model }: RuleContext, rule: ReturnType<typeof ruleOf>): Finding[] {
+  const worked = model();
+  const of = (
+    fault: ModelFault | null | undefined,
+    place: Finding['place'],
+    name: string,
+  ): Finding[] =>
+    fault && ruleOf(fault) === rule && !follows(fault)
+      ? [
+          {
+            place,
+            message: `${name}: ${fault.message}`,
+            cure: fault.cure ?? 'Mend its expression.',
+          },
+        ]
+      : [];
+  return [
+    ...document.dimensions.flatMap((d) =>
+      of(worked.dimensions.get(d.id)?.error, { in: 'dimensions', elementId: d.id }, d.name),
+    ),
+    ...document.parts.flatMap((part) => {
       const state = worked.parts.get(part.id);
-      const error = state?.length.error ?? state?.width.error ?? state?.thickness.error;
-      return error
-        ? [
-            {
-              place: { in: 'parts', elementId: part.id },
-              message: `Part ${part.mark}, ${part.name}: ${error.message}`,
-              cure: error.cure ?? 'Mend its size.',
-            },
-          ]
-        : [];
-    });
-    return [...dimensions, ...parts];
-  },
-};
+      const fault = state?.length.error ?? state?.width.error ?? state?.thickness.error;
+      return of(fault, { in: 'parts', elementId: part.id }, `Part ${part.mark}, ${part.name}`);
+    }),
+  ];
+}
+
+const rule = (id: ReturnType<typeof ruleOf>, source: string): Rule => ({
+  id,
+  level: 'must',
+  source,
+  run: (context) => faults(context, id),
+});
+
+export const dimsUnknown = rule(
+  'dims/unknown',
+  'plan model §2: every symbol names a dimension, every expression can be read',
+);
+export const dimsLoop = rule('dims/loop', 'plan model §2: no dimension depends on itself');
+export const dimsKind = rule('dims/kind', 'plan model §1: unlike kinds are not added');

@@ -1,0 +1,49 @@
+import { actionsOf, atStep, mm } from '../actions';
+import { type Finding, type Rule } from '../rule';
+
+/** Largest speed for a bit's diameter: over mm, rev/min. Common practice, no source; the bit's own mark wins. */
+const speeds = [
+  { over: 65, rpm: 12_000 },
+  { over: 50, rpm: 16_000 },
+  { over: 25, rpm: 18_000 },
+  { over: 0, rpm: 24_000 },
+] as const;
+
+export const safetyRouter: Rule = {
+  id: 'safety/router',
+  level: 'should',
+  source: 'common practice, no source; the speed marked on the bit wins',
+  run: ({ document, model }) =>
+    actionsOf(document, 'cut').flatMap(({ action, step, number }): Finding[] => {
+      if (action.machine !== 'router' && action.machine !== 'router-table') return [];
+      const found: Finding[] = [];
+      if (action.feedAgainstRotation === false)
+        found.push(
+          atStep(
+            step,
+            `Step ${number} feeds with the rotation of the bit: it pulls itself along.`,
+            'Feed against the rotation.',
+          ),
+        );
+      const bit = mm(model(), action.bitDiameter);
+      const pass = mm(model(), action.depthPerPass);
+      if (bit !== null && pass !== null && pass > bit + 1e-6)
+        found.push(
+          atStep(
+            step,
+            `Step ${number} takes a deeper pass than the bit is thick.`,
+            'Take it in several passes, none deeper than the bit’s diameter.',
+          ),
+        );
+      const most = bit === null ? null : speeds.find((s) => bit > s.over)!.rpm;
+      if (most !== null && action.rpm !== undefined && action.rpm > most)
+        found.push(
+          atStep(
+            step,
+            `Step ${number} turns a bit of ${Math.round(bit ?? 0)} mm at ${action.rpm} rev/min.`,
+            `At most ${most} for that diameter, or less as the bit is marked.`,
+          ),
+        );
+      return found;
+    }),
+};
