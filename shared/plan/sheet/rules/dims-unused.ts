@@ -1,4 +1,22 @@
+import { type PlanDocument } from '../../document';
 import { type Rule } from '../rule';
+
+/** Every word that stands in an expression outside dimensions and checks: the symbols used there. */
+function wordsIn(document: PlanDocument): ReadonlySet<string> {
+  const { size, stock, hardware, parts } = document;
+  const text = JSON.stringify([size, stock, hardware, parts, document.steps.map((s) => s.actions)]);
+  return new Set(text.match(/[A-Za-z][A-Za-z0-9_]*/g) ?? []);
+}
+
+/** Ids of dimensions that steps take, hold or refer to. */
+function namedInSteps(document: PlanDocument): ReadonlySet<string> {
+  const ids = document.steps.flatMap((s) => [
+    ...s.takes,
+    ...s.holds,
+    ...[...s.text.matchAll(/\{\{dim:([0-9a-f-]+)\}\}/g)].map((m) => m[1]!),
+  ]);
+  return new Set(ids);
+}
 
 export const dimsUnused: Rule = {
   id: 'dims/unused',
@@ -6,23 +24,18 @@ export const dimsUnused: Rule = {
   source: 'plan model §7: every dimension is used somewhere',
   run: ({ document, model }) => {
     const worked = model();
-    const texts = document.steps.map((s) => s.text).join('\n');
-    const named = JSON.stringify([
-      document.size,
-      document.stock,
-      document.hardware,
-      document.parts,
-      document.steps.map((s) => s.actions),
-    ]);
-    return document.dimensions.flatMap((d) => {
-      const used = worked.usedBy(d.id);
-      const inSteps =
-        document.steps.some((s) => s.takes.includes(d.id) || s.holds.includes(d.id)) ||
-        texts.includes(d.id);
-      const elsewhere =
-        used.dimensions.length + used.checks.length + used.parts.length > 0 ||
-        new RegExp(`\\b${d.symbol}\\b`).test(named);
-      return inSteps || elsewhere || d.symbol === ''
+    const words = wordsIn(document);
+    const inSteps = namedInSteps(document);
+    const fed = new Set(document.dimensions.flatMap((d) => worked.feeds(d.id)));
+    const inChecks = new Set(
+      document.checks.flatMap((c) => c.expression.match(/[A-Za-z][A-Za-z0-9_]*/g) ?? []),
+    );
+    return document.dimensions.flatMap((d) =>
+      d.symbol === '' ||
+      inSteps.has(d.id) ||
+      fed.has(d.id) ||
+      words.has(d.symbol) ||
+      inChecks.has(d.symbol)
         ? []
         : [
             {
@@ -30,7 +43,7 @@ export const dimsUnused: Rule = {
               message: `Nothing uses ${d.name}.`,
               cure: 'Use it, or take it out.',
             },
-          ];
-    });
+          ],
+    );
   },
 };
