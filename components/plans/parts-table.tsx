@@ -28,8 +28,36 @@ function Size({ figures }: { figures: (FigureParts | null)[] }) {
   );
 }
 
+/** A part's size, and the maker's below it where it differs. */
+function Sizes({ part, values, maker }: { part: Part; values: PlanValues; maker: PlanValues }) {
+  const own = values.model.parts.get(part.id);
+  const before = maker.model.parts.get(part.id);
+  const differs = (['length', 'width', 'thickness'] as const).some(
+    (side) => Math.abs((own?.[side].value?.x ?? 0) - (before?.[side].value?.x ?? 0)) > 0.005,
+  );
+  return (
+    <>
+      <Size figures={sizesOf(part, values)} />
+      {differs ? (
+        <Text size="small" tone="ink2">
+          maker’s <Size figures={sizesOf(part, maker)} />
+        </Text>
+      ) : null}
+    </>
+  );
+}
+
 /** The cut list: mark, name, size, how many, of what. */
-export function PartsTable({ document, values }: { document: PlanDocument; values: PlanValues }) {
+export function PartsTable({
+  document,
+  values,
+  maker = values,
+}: {
+  document: PlanDocument;
+  values: PlanValues;
+  /** The maker's own build, to mark what differs. */
+  maker?: PlanValues;
+}) {
   const columns: Column<Part>[] = [
     {
       key: 'part',
@@ -49,7 +77,7 @@ export function PartsTable({ document, values }: { document: PlanDocument; value
       title: 'Size',
       unit: values.preference.system,
       align: 'right',
-      cell: (part) => <Size figures={sizesOf(part, values)} />,
+      cell: (part) => <Sizes part={part} values={values} maker={maker} />,
     },
     {
       key: 'of',

@@ -3,6 +3,8 @@ import { Image, StyleSheet } from 'react-native';
 import { mediaPath } from '../../shared/api/media';
 import { type PlanPage } from '../../shared/api/plans';
 import { type StickStep } from '../../shared/plan/stick/types';
+import { useOwnFigures } from '../data/own-figures';
+import { usePreferences } from '../data/preferences';
 import { PageHead } from '../shell/page-head';
 import { PlanStick } from '../story-stick/plan-stick';
 import { StoryStick } from '../story-stick/story-stick';
@@ -15,6 +17,7 @@ import { Text } from '../ui/text';
 import { colour, line } from '../ui/tokens';
 import { CheckList } from './check-list';
 import { ClipPlayer } from './clip-player';
+import { changedFrom, OwnMachine, readingsOf } from './own-machine';
 import { PartsTable } from './parts-table';
 import { PlanAside } from './plan-aside';
 import { PlanLists } from './plan-lists';
@@ -22,10 +25,21 @@ import { usePlanValues } from './plan-model';
 import { stickOf } from './plan-stick-input';
 import { StepBody } from './step-body';
 
+/** The plan's figures as the maker built it, and with the reader's own readings. */
+function useOwnValues({ id, document }: PlanPage) {
+  const { typed } = useOwnFigures(id);
+  const [{ units }] = usePreferences();
+  const readings = useMemo(() => readingsOf(document, typed, units), [document, typed, units]);
+  const maker = usePlanValues(document);
+  const values = usePlanValues(document, readings);
+  const changed = useMemo(() => changedFrom(values, maker), [values, maker]);
+  return { maker, values, changed };
+}
+
 /** A published plan, laid out as the drawing it is. */
 export function PlanContent({ page }: { page: PlanPage }) {
   const { document } = page;
-  const values = usePlanValues(document);
+  const { maker, values, changed } = useOwnValues(page);
   const stick = useMemo(
     () => stickOf(document, page.talk.bySteps, undefined, values.model),
     [document, page.talk.bySteps, values.model],
@@ -89,15 +103,17 @@ export function PlanContent({ page }: { page: PlanPage }) {
                 step={document.steps[step.number - 1]!}
                 document={document}
                 values={values}
+                changed={changed}
               />
             )}
           />
         </Section>
+        <OwnMachine planId={page.id} document={document} values={values} changed={changed.size} />
         <Section>
           <Heading level={2} note={`${document.parts.length}`}>
             Cut list
           </Heading>
-          <PartsTable document={document} values={values} />
+          <PartsTable document={document} values={values} maker={maker} />
         </Section>
         {document.checks.length > 0 ? (
           <Section>

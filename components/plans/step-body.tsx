@@ -12,10 +12,13 @@ export function StepBody({
   step,
   document,
   values,
+  changed,
 }: {
   step: Step;
   document: PlanDocument;
   values: PlanValues;
+  /** Ids of dimensions that differ from the maker's build. */
+  changed?: ReadonlySet<string>;
 }) {
   const asked = document.dimensions.filter(
     (d) => step.takes.includes(d.id) || step.holds.includes(d.id),
@@ -32,7 +35,8 @@ export function StepBody({
             return (
               <Text key={dimension.id} size="note" tone="ink2">
                 {step.takes.includes(dimension.id) ? 'Take ' : ''}
-                {dimension.name}{' '}
+                {dimension.name}
+                {changed?.has(dimension.id) ? ', yours' : ''}{' '}
                 {figure ? <Figure figure={figure} tone="ink" weight={600} /> : null}
               </Text>
             );
