@@ -1,4 +1,4 @@
-import { useLocalSearchParams, useRouter } from 'expo-router';
+import { useLocalSearchParams, useRouter, type Href } from 'expo-router';
 import { useState } from 'react';
 import { useSignIn } from '../data/me-queries';
 import { Heading } from '../ui/heading';
@@ -23,7 +23,7 @@ export function SignInScreen() {
         onTrouble={setTrouble}
         submit={async (values) => {
           await signIn.mutateAsync(values);
-          router.replace(safeNext(next));
+          router.replace(safeNext(next) as Href);
         }}
       />
       <Row justify="space-between" wrap>

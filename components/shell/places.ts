@@ -1,3 +1,4 @@
+import { type Href } from 'expo-router';
 import { type IconName } from '../ui/icon';
 import { hasRole, type ShellPerson, type ShellRole } from './shell-person';
 
@@ -7,7 +8,7 @@ export interface Place {
   key: PlaceKey;
   label: string;
   icon: IconName;
-  href: string;
+  href: Extract<Href, string>;
   /** Only for people with this role. */
   role?: ShellRole;
   /** On a phone it is found under You instead. */

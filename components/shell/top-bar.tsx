@@ -1,4 +1,4 @@
-import { Link as RouterLink } from 'expo-router';
+import { Link as RouterLink, type Href } from 'expo-router';
 import { type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { Icon } from '../ui/icon';
@@ -26,7 +26,7 @@ export function TopBar(props: TopBarProps) {
   return (
     <View style={[styles.bar, back ? styles.withBack : undefined]} dataSet={{ print: 'no' }}>
       {back ? (
-        <RouterLink href={back} aria-label={backLabel} style={backLink}>
+        <RouterLink href={back as Href} aria-label={backLabel} style={backLink}>
           <Icon name={backIcon} />
         </RouterLink>
       ) : null}

@@ -1,4 +1,4 @@
-import { Link as RouterLink } from 'expo-router';
+import { Link as RouterLink, type Href } from 'expo-router';
 import { type ReactNode } from 'react';
 import { Text as RawText } from 'react-native';
 import { textStyle, useInsideText, type TextStyleProps } from './text';
@@ -51,7 +51,7 @@ export function Link({
     );
   }
   return (
-    <RouterLink href={href} replace={replace} aria-label={label} style={style}>
+    <RouterLink href={href as Href} replace={replace} aria-label={label} style={style}>
       {children}
     </RouterLink>
   );

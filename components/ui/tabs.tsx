@@ -1,4 +1,4 @@
-import { Link as RouterLink } from 'expo-router';
+import { Link as RouterLink, type Href } from 'expo-router';
 import { type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { arrowKeys, spacePresses } from './arrow-keys';
@@ -106,7 +106,7 @@ export function LinkTabs({ label, tabs, current, fill = false }: LinkTabsProps) 
         return (
           <View key={tab.href} style={fill && styles.fill}>
             <RouterLink
-              href={tab.href}
+              href={tab.href as Href}
               aria-current={on ? 'page' : undefined}
               style={linkTab}
               dataSet={{ focusInside: 'yes' }}
