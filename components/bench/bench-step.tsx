@@ -5,6 +5,7 @@ import { type BenchState } from '../../shared/plan/bench/fold';
 import { type Step } from '../../shared/plan/document';
 import { ClipPlayer } from '../plans/clip-player';
 import { type PlanValues } from '../plans/plan-model';
+import { StepPhotos } from '../plans/step-photos';
 import { referencesOf } from '../plans/step-references';
 import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
@@ -68,6 +69,7 @@ export function BenchStep(props: BenchStepProps) {
           {step.text}
         </Prose>
       ) : null}
+      <StepPhotos step={step} document={copy.document} />
       {asked.map((dimension) => (
         <DimensionLineup
           key={dimension.id}

@@ -3,7 +3,8 @@ import { useEffect, useMemo, useState } from 'react';
 import { View } from 'react-native';
 import { type Draft } from '../../shared/api/plans';
 import { type Dimension, type PlanDocument } from '../../shared/plan/document';
-import { createModel } from '../../shared/plan/model';
+import { createModel, type PlanModel } from '../../shared/plan/model';
+import { type SheetRow } from '../../shared/plan/sheet';
 import { renameSymbol } from '../../shared/plan/rename';
 import { SignedIn } from '../account/signed-in';
 import { readLocal, dropLocal } from '../data/kept-draft';
@@ -34,6 +35,7 @@ import {
 } from './list-fields';
 import { ListEditor } from './list-editor';
 import { PublishPane } from './publish-pane';
+import { SheetPane } from './sheet-pane';
 import { StepsPane } from './steps-pane';
 import { useDraftEditor, type DraftEditor, type Kept } from './use-draft-editor';
 
@@ -137,7 +139,7 @@ function Editing({ draft }: { draft: Draft }) {
           fill={false}
         />
         <TabPanel id="draft" value={tab}>
-          {tab === 'steps' ? <StepsTab editor={editor} /> : null}
+          {tab === 'steps' ? <StepsTab editor={editor} model={model} onTab={setTab} /> : null}
           {tab === 'dimensions' ? (
             <>
               <ListEditor
@@ -199,8 +201,28 @@ function withDimensions(document: PlanDocument, dimensions: Dimension[]): PlanDo
   return renameSymbol(document, before.get(changed.id) ?? '', changed.symbol);
 }
 
+/** Where each list of the plan is edited. */
+const tabOf: Partial<Record<SheetRow['place']['in'], Tab>> = {
+  dimensions: 'dimensions',
+  checks: 'dimensions',
+  parts: 'parts',
+  stock: 'parts',
+  hardware: 'parts',
+  tools: 'tools',
+  links: 'tools',
+};
+
 /** Clip and captions at the left, the steps on the stick, the check sheet: three panes at a desk. */
-function StepsTab({ editor }: { editor: DraftEditor }) {
+function StepsTab({
+  editor,
+  model,
+  onTab,
+}: {
+  editor: DraftEditor;
+  model: PlanModel;
+  onTab: (tab: Tab) => void;
+}) {
+  const [open, setOpen] = useState<string | null>(null);
   const place = useClipPlace();
   const { clip } = editor.document;
   const hash = clip.source === 'none' ? undefined : clip.captions;
@@ -212,7 +234,7 @@ function StepsTab({ editor }: { editor: DraftEditor }) {
         {
           key: 'clip',
           label: 'Clip and captions',
-          width: 400,
+          width: 340,
           content: (
             <Stack gap={16} style={{ padding: 4 }}>
               <ClipPane editor={editor} place={place} />
@@ -225,7 +247,24 @@ function StepsTab({ editor }: { editor: DraftEditor }) {
           label: 'Steps',
           content: (
             <View style={{ padding: 4, paddingHorizontal: 12 }}>
-              <StepsPane editor={editor} place={place} cues={cues} />
+              <StepsPane editor={editor} place={place} cues={cues} open={open} setOpen={setOpen} />
+            </View>
+          ),
+        },
+        {
+          key: 'sheet',
+          label: 'Check sheet',
+          width: 300,
+          content: (
+            <View style={{ padding: 4, paddingHorizontal: 12 }}>
+              <SheetPane
+                document={editor.document}
+                model={model}
+                onPlace={({ place: { in: list, elementId } }) => {
+                  if (list === 'steps') setOpen(elementId);
+                  else onTab(tabOf[list] ?? 'about');
+                }}
+              />
             </View>
           ),
         },

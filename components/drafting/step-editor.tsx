@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { v7 as uuid } from 'uuid';
 import { limits } from '../../shared/api/limits';
 import { type Heard, type PlanDocument, type Step } from '../../shared/plan/document';
@@ -30,6 +30,8 @@ export interface StepEditorProps {
   onChange: (step: Step) => void;
   /** Makes a dimension of a figure heard in the clip. */
   onDimension: (heard: Heard) => void;
+  /** The step's photos, with their own upload. */
+  photos: ReactNode;
   onRemove: () => void;
 }
 
@@ -94,6 +96,7 @@ export function StepEditor(props: StepEditorProps) {
           })
         }
       />
+      {props.photos}
       <MadeHere step={step} document={document} set={set} />
       <HeardList {...props} />
       <Row>

@@ -1,4 +1,4 @@
-import { useMemo, useState } from 'react';
+import { useMemo } from 'react';
 import { View } from 'react-native';
 import { type Cue } from '../../shared/captions';
 import { type Step } from '../../shared/plan/document';
@@ -15,6 +15,7 @@ import { Text } from '../ui/text';
 import { type ClipPlace } from './clip-place';
 import { DragHandle, DropPlace } from './drag-order';
 import { StepEditor } from './step-editor';
+import { StepPhotos } from './step-photos';
 import { useStepEdits } from './use-step-edits';
 import { withDimension } from './with-dimension';
 import { type DraftEditor } from './use-draft-editor';
@@ -23,12 +24,14 @@ export interface StepsPaneProps {
   editor: DraftEditor;
   place: ClipPlace;
   cues: readonly Cue[];
+  /** The step that is open. */
+  open: string | null;
+  setOpen: (id: string | null) => void;
 }
 
 /** The steps on the stick and below each other; order by buttons, by Alt with arrows, by dragging. */
-export function StepsPane({ editor, place, cues }: StepsPaneProps) {
+export function StepsPane({ editor, place, cues, open, setOpen }: StepsPaneProps) {
   const { document, change } = editor;
-  const [open, setOpen] = useState<string | null>(null);
   const stick = useMemo(() => stickOf(document, {}), [document]);
   const { setSteps, replace, move, moveTo, mark, start, add } = useStepEdits(
     editor,
@@ -96,6 +99,7 @@ export function StepsPane({ editor, place, cues }: StepsPaneProps) {
                     onMark={mark}
                     onChange={replace}
                     onDimension={(heard) => change((d) => withDimension(d, step.id, heard))}
+                    photos={<StepPhotos step={step} editor={editor} />}
                     onRemove={() => remove(step)}
                   />
                 ) : null}

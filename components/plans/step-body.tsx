@@ -5,6 +5,7 @@ import { Row, Stack } from '../ui/layout';
 import { Prose } from '../ui/prose';
 import { Text } from '../ui/text';
 import { type PlanValues } from './plan-model';
+import { StepPhotos } from './step-photos';
 import { referencesOf } from './step-references';
 
 /** What a step says: its text, dimensions, cautions and waits. */
@@ -28,6 +29,7 @@ export function StepBody({
       {step.text ? (
         <Prose renderReference={referencesOf(document, values)}>{step.text}</Prose>
       ) : null}
+      <StepPhotos step={step} document={document} />
       {asked.length > 0 ? (
         <Row gap={16} wrap align="baseline">
           {asked.map((dimension) => {

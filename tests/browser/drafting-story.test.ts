@@ -1,4 +1,5 @@
 import { join } from 'node:path';
+import sharp from 'sharp';
 import { axe, story } from './harness';
 
 const odalys = { email: 'odalys@marrow-lane.example', password: 'cut once measure twice' };
@@ -47,6 +48,22 @@ describe('a creator makes a plan of a clip and its captions', () => {
       await page.getByText(/jotted down/).waitFor();
       await page.getByRole('button', { name: 'Open step 1' }).waitFor();
       expect(await axe(page)).toEqual([]);
+
+      // A photo on a step, with its words; the check sheet asked for them beside the steps.
+      await page.getByRole('button', { name: 'Open step 1' }).click();
+      const picture = await sharp({
+        create: { width: 320, height: 200, channels: 3, background: '#778286' },
+      })
+        .jpeg()
+        .toBuffer();
+      await pick('Add photos', { name: 'shelf.jpg', mimeType: 'image/jpeg', buffer: picture });
+      await page.getByText('Photo 1 has no words for those who cannot see it.').waitFor();
+      await page
+        .getByLabel('What photo 1 shows, for those who cannot see it')
+        .fill('A grey shelf.');
+      await page
+        .getByText('Photo 1 has no words for those who cannot see it.')
+        .waitFor({ state: 'detached' });
 
       await page.getByRole('tab', { name: 'Dimensions' }).click();
       await page.getByRole('button', { name: 'Add to dimensions' }).click();

@@ -1,0 +1,48 @@
+import { checkSheet, type SheetRow } from '../../shared/plan/sheet';
+import { type PlanModel } from '../../shared/plan/model';
+import { type PlanDocument } from '../../shared/plan/document';
+import { useMemo } from 'react';
+import { Heading } from '../ui/heading';
+import { Row, Rule, Stack } from '../ui/layout';
+import { PressArea } from '../ui/pressable';
+import { Text } from '../ui/text';
+import { VerdictShape, verdictKind, Verdict } from '../ui/verdict';
+
+export interface SheetPaneProps {
+  document: PlanDocument;
+  model: PlanModel;
+  /** Leads to the place a row speaks of. */
+  onPlace: (row: SheetRow) => void;
+}
+
+/** The check sheet, live beside the work; each row leads to its place. */
+export function SheetPane({ document, model, onPlace }: SheetPaneProps) {
+  const sheet = useMemo(() => checkSheet(document, model), [document, model]);
+  return (
+    <Stack gap={12}>
+      <Heading level={2} note={`${sheet.rows.length}`}>
+        Check sheet
+      </Heading>
+      {sheet.rows.map((row, i) => (
+        <Stack key={`${row.rule}-${row.place.elementId ?? ''}-${i}`} gap={8}>
+          <PressArea role="button" label={`${row.message} Go there`} onPress={() => onPlace(row)}>
+            <Row gap={12} align="flex-start">
+              <VerdictShape kind={verdictKind(row.verdict)} />
+              <Stack gap={4} style={{ flex: 1 }}>
+                <Text size="note" weight={600}>
+                  {row.message}
+                </Text>
+                <Text size="note">{row.cure}</Text>
+                <Text size="small" mono tone="ink2">
+                  {row.rule}, {row.level}
+                </Text>
+              </Stack>
+            </Row>
+          </PressArea>
+          <Rule />
+        </Stack>
+      ))}
+      <Verdict kind="holds" word={`${sheet.quiet} rules find nothing`} />
+    </Stack>
+  );
+}
