@@ -36,6 +36,8 @@ module.exports = {
     },
     {
       displayName: 'server',
+      globalSetup: '<rootDir>/tests/api/setup/services.ts',
+      globalTeardown: '<rootDir>/tests/api/setup/stop-services.ts',
       testEnvironment: 'node',
       testMatch: ['<rootDir>/tests/api/**/*.test.ts'],
       // Its exports know only `import`, which Jest's CommonJS does not ask for.

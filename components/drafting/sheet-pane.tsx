@@ -42,7 +42,7 @@ export function SheetPane({ document, model, onPlace }: SheetPaneProps) {
           <Rule />
         </Stack>
       ))}
-      <Verdict kind="holds" word={`${sheet.quiet} rules find nothing`} />
+      <Verdict kind="holds" word={`${sheet.quiet} rules hold`} />
     </Stack>
   );
 }

@@ -1,7 +1,4 @@
 import { randomUUID } from 'node:crypto';
-import { mkdtempSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
 import pino from 'pino';
 import request from 'supertest';
 import { v7 as uuid } from 'uuid';
@@ -13,9 +10,7 @@ import { type Deps } from '../../../server/deps';
 import { readEnv } from '../../../server/env';
 import { hashPassword } from '../../../server/features/accounts/passwords';
 import { startJobs } from '../../../server/jobs/jobs';
-import { startMailCatcher, type MailCatcher } from '../../../server/local/mail-catcher';
-import { startObjectStore } from '../../../server/local/object-store';
-import { startPostgres } from '../../../server/local/postgres';
+import { databaseUrl, startMailCatcher, templateName, type MailCatcher } from './services';
 import { makeStorage } from '../../../server/storage/storage';
 
 export const password = 'a long enough phrase';
@@ -32,23 +27,25 @@ export interface TestApp {
 }
 
 /** The real application on services of its own: PostgreSQL, object store, mail. */
-export async function testApp(): Promise<TestApp> {
-  const dir = mkdtempSync(join(tmpdir(), 'scantling-api-'));
-  const postgres = await startPostgres({ dir: join(dir, 'pg'), durable: false });
-  const store = await startObjectStore({ dir: join(dir, 's3'), buckets: ['scantling'] });
+export async function testApp({ rateFactor = 10_000 } = {}): Promise<TestApp> {
+  const shared = process.env.SCANTLING_TEST_DATABASE;
+  const store = process.env.SCANTLING_TEST_STORE;
+  if (!shared || !store) throw new Error('API tests run as a Jest project: npm run test:api');
+  const name = `t_${randomUUID().replaceAll('-', '')}`;
+  const root = await makeDataSource(shared, 1).initialize();
+  await root.query(`CREATE DATABASE ${name} TEMPLATE ${templateName}`);
   const mail = await startMailCatcher({});
   const env = readEnv({
     NODE_ENV: 'test',
-    DATABASE_URL: postgres.url,
-    S3_ENDPOINT: store.endpoint,
+    DATABASE_URL: databaseUrl(shared, name),
+    S3_ENDPOINT: store,
     SMTP_URL: mail.url,
     SESSION_SECRET: randomUUID(),
     LOG_LEVEL: 'silent',
-    RATE_FACTOR: '10000',
+    RATE_FACTOR: String(rateFactor),
   });
   const log = pino({ level: 'silent' });
   const db = await makeDataSource(env.DATABASE_URL, 5).initialize();
-  await db.runMigrations();
   const storage = makeStorage(env);
   await storage.ensureBucket();
   const jobs = await startJobs(env, log);
@@ -89,9 +86,8 @@ export async function testApp(): Promise<TestApp> {
       await jobs.stop();
       await db.destroy();
       await mail.stop();
-      await store.stop();
-      await postgres.stop();
-      rmSync(dir, { recursive: true, force: true });
+      await root.query(`DROP DATABASE ${name} WITH (FORCE)`);
+      await root.destroy();
     },
   };
 }
