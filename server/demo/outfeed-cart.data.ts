@@ -38,7 +38,7 @@ export const outfeedCart: PlanRows = {
     ],
     ['stud_t', 'Leg stock, thickness', 'taken', '1 1/2 in', '1/32 in', { instrument: 'rule' }],
     ['stud_w', 'Leg stock, width', 'taken', '3 1/2 in', '1/32 in', { instrument: 'rule' }],
-    ['below', 'Cart below the saw table', 'given', '1/16 in', '1/32 in', { sense: 'setting' }],
+    ['below', 'Cart below the saw table', 'given', '3/16 in', '1/32 in', { sense: 'setting' }],
     ['cart_h', 'Cart height', 'derived', 'saw_h - below', '1/16 in'],
     [
       'leg_l',
@@ -60,6 +60,26 @@ export const outfeedCart: PlanRows = {
     ['shelf_w', 'Shelf width', 'derived', 'frame_w', '1/16 in'],
     ['bolt_l', 'Castor bolt length', 'given', '1 1/2 in', ''],
     ['screw_l', 'Construction screw', 'given', '3 in', ''],
+    [
+      'kerf',
+      'Saw kerf',
+      'taken',
+      '1/8 in',
+      '1/64 in',
+      { instrument: 'calipers', sense: 'inside', where: 'Width of a cut in scrap.' },
+    ],
+    ['top_t', 'Top thickness', 'derived', '2 * ply_t', '1/32 in'],
+    ['stud_l', 'Stud on sale', 'given', '96 in', '1/8 in'],
+    ['legs_need', 'Stud the legs need', 'derived', '2 * leg_l + 3 * kerf', ''],
+    [
+      'slope',
+      'Floor slope over the cart',
+      'given',
+      '1/8 in',
+      '',
+      { sense: 'form', over: '48 in', instrument: 'tape' },
+    ],
+    ['under_shelf', 'Room above the shelf', 'derived', 'leg_l - shelf_h', '1/8 in'],
   ],
   checks: [
     [
@@ -75,10 +95,15 @@ export const outfeedCart: PlanRows = {
     ],
     [
       'Frame stands inside the top',
-      'frame_l + 2 * overhang = top_l within 1/8 in',
+      'frame_l + 2 * overhang = top_l within 3/8 in',
       'The top overhangs all round.',
       'should',
     ],
+    ['Bolts reach through', 'bolt_l > ply_t + 1/4 in', 'A nut needs a full thread.', 'should'],
+    ['Two legs come from one stud', 'legs_need < stud_l', 'Or buy one stud more.'],
+    ['Top is stiff enough', 'top_t > 1.2 in', 'A thin top sags under a long board.', 'should'],
+    ['Room for a bin', 'under_shelf > 12 in', 'What is kept below must come out again.', 'should'],
+    ['Castors stand clear', 'castor_h > 3 in', 'Small wheels stop at every cable.', 'should'],
   ],
   stock: [
     {
@@ -88,7 +113,7 @@ export const outfeedCart: PlanRows = {
       material: 'plywood',
       thickness: 'ply_t',
       quantity: 2,
-      kerf: '1/8 in',
+      kerf: 'kerf',
       sizes: [{ length: '96 in', width: '48 in', price: 58 }],
     },
     {
@@ -98,7 +123,7 @@ export const outfeedCart: PlanRows = {
       material: 'softwood',
       thickness: 'stud_t',
       quantity: 5,
-      kerf: '1/8 in',
+      kerf: 'kerf',
       sizes: [{ length: '96 in', width: 'stud_w', price: 5 }],
     },
   ],
@@ -218,8 +243,8 @@ export const outfeedCart: PlanRows = {
       seconds: 30,
       minutes: 15,
       says: 'measure the saw table off the floor at both ends mine is thirty four and an eighth then a castor standing locked and your stock',
-      text: 'Take the height of your saw’s table, one castor, the sheet and a two by four. Floors slope: measure where the cart will stand.',
-      takes: ['saw_h', 'castor_h', 'ply_t', 'stud_t', 'stud_w'],
+      text: 'Take the height of your saw’s table, one castor, the sheet, a two by four and the width of a cut. Floors slope: measure where the cart will stand.',
+      takes: ['saw_h', 'castor_h', 'ply_t', 'stud_t', 'stud_w', 'kerf'],
       heard: [
         {
           words: 'thirty four and an eighth',
@@ -373,7 +398,7 @@ export const outfeedCart: PlanRows = {
       text: 'Screw {{part:E}} on the lower rails and the top on the frame, overhanging {{dim:overhang}} all round. Roll it behind the saw, power off, and slide a straight board across: it must never catch.',
       parts: ['E:used', 'A:used'],
       tools: ['drill'],
-      holds: ['cart_h', 'overhang'],
+      holds: ['cart_h', 'overhang', 'slope'],
       checks: ['Cart passes under the saw table'],
 
       cautions: [

@@ -53,7 +53,7 @@ export const toolCabinet: PlanRows = {
       'groove_w',
       'Groove width for the back',
       'derived',
-      'back_t + 0.2 mm',
+      'back_t + 0.4 mm',
       '0.1 mm',
       { sense: 'inside', instrument: 'calipers' },
     ],
@@ -72,7 +72,7 @@ export const toolCabinet: PlanRows = {
       'shelf_l',
       'Shelf length',
       'derived',
-      'made(inner_w) - 0.5 mm',
+      'made(inner_w) - 1 mm',
       '0.2 mm',
       { instrument: 'rule' },
     ],
@@ -92,11 +92,20 @@ export const toolCabinet: PlanRows = {
       '',
       { sense: 'form', over: '1000 mm', instrument: 'tape' },
     ],
+    ['sheet_l', 'Sheet length on sale', 'given', '2440 mm', '2 mm'],
+    [
+      'rows_need',
+      'Length two doors and a side need',
+      'derived',
+      '2 * door_h + height + 2 * kerf',
+      '',
+    ],
+    ['cleat_room', 'Room left behind the back', 'derived', 'cleat_d - sheet_t', ''],
   ],
   checks: [
     [
       'Carcase adds up',
-      'inner_w + 2 * sheet_t = width within 1 mm',
+      'inner_w + 2 * sheet_t = width within 1.5 mm',
       'Two sides and the inside make the outside width.',
     ],
     [
@@ -111,8 +120,8 @@ export const toolCabinet: PlanRows = {
     ],
     [
       'Doors never touch',
-      'width - 2 * door_w - 2 * door_gap > 1 mm',
-      'A gap of at least a millimetre is left between the doors.',
+      'width - 2 * door_w - 2 * door_gap > 0.2 mm',
+      'A gap is always left between the doors.',
     ],
     ['Shelf goes in', 'shelf_l < inner_w', 'The shelf must pass between the sides.'],
     [
@@ -121,6 +130,9 @@ export const toolCabinet: PlanRows = {
       'The shelf stays behind the doors.',
       'should',
     ],
+    ['Cleat has room', 'cleat_room > 1 mm', 'The cleat of sheet hangs behind the back.'],
+    ['Doors and a side come off one length', 'rows_need < sheet_l', 'In one row of the sheet.'],
+    ['Screw stays inside', 'screw_l < sheet_t + inner_w', 'Nothing comes out inside.', 'should'],
   ],
   stock: [
     {
