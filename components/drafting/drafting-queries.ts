@@ -32,7 +32,7 @@ export const useDraft = (planId: string) =>
 export function useCreateDraft() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: { title: string; units: 'mm' | 'in' }) =>
+    mutationFn: (body: { title: string; units: 'mm' | 'in'; document?: PlanDocument }) =>
       call(createDraft, { body: { id: uuid(), ...body } }),
     onSuccess: () => void client.invalidateQueries({ queryKey: keys.drafts, exact: true }),
   });

@@ -16,6 +16,7 @@ import { EmptyState, ErrorState, LoadingLines } from '../ui/states';
 import { Text } from '../ui/text';
 import { TextField } from '../ui/text-field';
 import { useCreateDraft, useDrafts } from './drafting-queries';
+import { BringPlanFile } from './plan-file';
 
 /** One's own plans. */
 export function DraftingScreen() {
@@ -53,6 +54,7 @@ function Plans() {
       <PageHead title="Drafting" />
       <Page>
         <Begin />
+        <BringPlanFile />
         {drafts.data ? (
           drafts.data.items.length === 0 ? (
             <EmptyState title="No plan yet">

@@ -13,6 +13,7 @@ import { Text } from '../ui/text';
 import { TextArea } from '../ui/text-field';
 import { Verdict, verdictKind } from '../ui/verdict';
 import { useMovePlan, usePublish } from './drafting-queries';
+import { SavePlanFile } from './plan-file';
 import { type DraftEditor } from './use-draft-editor';
 
 const keyOf = (row: SheetRow) => `${row.rule}/${row.place.elementId ?? ''}`;
@@ -86,6 +87,7 @@ export function PublishPane({ draft, editor }: { draft: Draft; editor: DraftEdit
           />
         </Row>
       </Section>
+      <SavePlanFile document={editor.document} />
       <Revisions draft={draft} />
     </Stack>
   );
