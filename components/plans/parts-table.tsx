@@ -1,9 +1,12 @@
+import { useState } from 'react';
 import { type Part, type PlanDocument } from '../../shared/plan/document';
 import { Figure, type FigureParts } from '../ui/figure';
+import { Heading } from '../ui/heading';
 import { Row } from '../ui/layout';
 import { Table, type Column } from '../ui/table';
 import { PartMark } from '../ui/tag';
 import { Text } from '../ui/text';
+import { PartElevation } from './part-elevation';
 import { type PlanValues } from './plan-model';
 
 /** Length, width and thickness of a part, as worked out. */
@@ -58,6 +61,7 @@ export function PartsTable({
   /** The maker's own build, to mark what differs. */
   maker?: PlanValues;
 }) {
+  const [open, setOpen] = useState<string | null>(null);
   const columns: Column<Part>[] = [
     {
       key: 'part',
@@ -91,7 +95,26 @@ export function PartsTable({
       cell: (part) => <Figure figure={{ whole: part.quantity }} size="note" />,
     },
   ];
+  const chosen = document.parts.find((part) => part.id === open);
   return (
-    <Table label="Cut list" columns={columns} rows={document.parts} rowKey={(part) => part.id} />
+    <>
+      <Table
+        label="Cut list"
+        columns={columns}
+        rows={document.parts}
+        rowKey={(part) => part.id}
+        rowState={(part) => (part.id === open ? 'chosen' : undefined)}
+        onRowPress={(part) => setOpen(part.id === open ? null : part.id)}
+        rowLabel={(part) => `Part ${part.mark}, ${part.name}: show its drawing`}
+      />
+      {chosen ? (
+        <>
+          <Heading level={3}>
+            {chosen.mark} {chosen.name}
+          </Heading>
+          <PartElevation part={chosen} values={values} />
+        </>
+      ) : null}
+    </>
   );
 }

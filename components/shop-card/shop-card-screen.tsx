@@ -2,9 +2,11 @@ import { useState } from 'react';
 import { v7 as uuid } from 'uuid';
 import { type ShopCard } from '../../shared/api/bench';
 import { machineClasses } from '../../shared/plan/document';
+import { machineName } from '../../shared/trade/machines';
 import { SignedIn } from '../account/signed-in';
 import { useSaveShopCard, useShopCard } from '../bench/bench-queries';
 import { tell } from '../data/problems';
+import { usePreferences } from '../data/preferences';
 import { PageHead } from '../shell/page-head';
 import { toast } from '../ui/announcer';
 import { Banner } from '../ui/banner';
@@ -82,6 +84,11 @@ interface ListProps {
 }
 
 function Machines({ card, setCard }: ListProps) {
+  const [{ terms }] = usePreferences();
+  const nameOf = (machine: string) =>
+    machineClasses.some((m) => m === machine)
+      ? machineName(machine as (typeof machineClasses)[number], terms)
+      : machine;
   const [machine, setMachine] = useState<(typeof machineClasses)[number]>('table-saw');
   const [name, setName] = useState('');
   return (
@@ -92,14 +99,14 @@ function Machines({ card, setCard }: ListProps) {
       {card.machines.map((m) => (
         <Line
           key={m.id}
-          words={`${m.machine.replace('-', ' ')}: ${m.name}`}
+          words={`${nameOf(m.machine)}: ${m.name}`}
           onDrop={() => setCard({ ...card, machines: card.machines.filter((x) => x.id !== m.id) })}
         />
       ))}
       <Row gap={12} align="flex-end" wrap>
         <Select
           label="Machine"
-          options={machineClasses.map((value) => ({ value, label: value.replace('-', ' ') }))}
+          options={machineClasses.map((value) => ({ value, label: machineName(value, terms) }))}
           value={machine}
           onChange={setMachine}
         />
