@@ -51,14 +51,24 @@ export function stepsFromCaptions(text: string): PlanDocument['steps'] {
     );
 }
 
-/** The clip and its captions: brought, watched, turned into steps. */
-export function ClipPane({
-  editor: { document, change },
-  place,
-}: {
-  editor: DraftEditor;
-  place: ClipPlace;
-}) {
+/** How long a clip plays, as this browser reads it; null when it cannot. */
+export function clipSeconds(file: File): Promise<number | null> {
+  return new Promise((resolve) => {
+    const video = window.document.createElement('video');
+    const url = URL.createObjectURL(file);
+    const done = (seconds: number | null) => {
+      URL.revokeObjectURL(url);
+      resolve(seconds);
+    };
+    video.preload = 'metadata';
+    video.onloadedmetadata = () => done(Number.isFinite(video.duration) ? video.duration : null);
+    video.onerror = () => done(null);
+    video.src = url;
+  });
+}
+
+/** Brings clip and caption files into the draft. */
+function useClipFiles({ document, change }: Pick<DraftEditor, 'document' | 'change'>) {
   const [progress, setProgress] = useState<number | null>(null);
   const [trouble, setTrouble] = useState<string | null>(null);
   const [found, setFound] = useState<string | null>(null);
@@ -68,6 +78,7 @@ export function ClipPane({
     setTrouble(null);
     setProgress(0);
     try {
+      const played = await clipSeconds(file);
       const { media } = await upload(uploadClip, file, {
         onProgress: (sent, total) => setProgress(sent / total),
       });
@@ -77,7 +88,7 @@ export function ClipPane({
         clip: {
           source: 'upload',
           media: media.hash,
-          duration: media.duration ?? 3600,
+          duration: media.duration ?? played ?? 0,
           ...(captions ? { captions } : {}),
         },
       }));
@@ -100,15 +111,32 @@ export function ClipPane({
         steps: d.steps.length > 0 ? d.steps : steps,
       }));
       const heard = steps.reduce((n, s) => n + s.heard.length, 0);
+      const unclipped =
+        clip.source === 'none'
+          ? ' Bring the clip, then the captions once more, to see them beside it.'
+          : '';
       setFound(
         document.steps.length > 0
-          ? 'The captions are kept. Your steps stay as they are.'
-          : `${steps.length} steps and ${heard} figures were jotted down. Look through them.`,
+          ? `The captions were read. Your steps stay as they are.${unclipped}`
+          : `${steps.length} steps and ${heard} figures were jotted down. Look through them.${unclipped}`,
       );
     } catch (error) {
       setTrouble(tell(error).text);
     }
   };
+  return { progress, trouble, found, bringClip, bringCaptions };
+}
+
+/** The clip and its captions: brought, watched, turned into steps. */
+export function ClipPane({
+  editor: { document, change },
+  place,
+}: {
+  editor: DraftEditor;
+  place: ClipPlace;
+}) {
+  const { clip } = document;
+  const { progress, trouble, found, bringClip, bringCaptions } = useClipFiles({ document, change });
   return (
     <Section>
       <Heading level={2}>Clip</Heading>
@@ -170,7 +198,13 @@ function Hosted({
     if (!bad)
       change((d) => ({
         ...d,
-        clip: { source: 'hosted', url, duration: minutes * 60, claimed: false },
+        clip: {
+          source: 'hosted',
+          url,
+          duration: minutes * 60,
+          claimed: false,
+          ...(d.clip.source !== 'none' && d.clip.captions ? { captions: d.clip.captions } : {}),
+        },
       }));
   };
   return (

@@ -1,5 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
-import { useEffect, useMemo, useState } from 'react';
+import { useMemo, useState } from 'react';
 import { View } from 'react-native';
 import { type Draft } from '../../shared/api/plans';
 import { type Dimension, type PlanDocument } from '../../shared/plan/document';
@@ -7,12 +7,12 @@ import { createModel, type PlanModel } from '../../shared/plan/model';
 import { type SheetRow } from '../../shared/plan/sheet';
 import { renameSymbol } from '../../shared/plan/rename';
 import { SignedIn } from '../account/signed-in';
-import { readLocal, dropLocal } from '../data/kept-draft';
 import { ApiProblem, tell } from '../data/problems';
 import { PageHead } from '../shell/page-head';
 import { Banner } from '../ui/banner';
+import { Button } from '../ui/button';
 import { Dialog } from '../ui/dialog';
-import { Page, Stack, WorkPanes } from '../ui/layout';
+import { Page, Row, Stack, WorkPanes } from '../ui/layout';
 import { ErrorState, LoadingLines } from '../ui/states';
 import { TabPanel, Tabs } from '../ui/tabs';
 import { Text } from '../ui/text';
@@ -114,7 +114,6 @@ function Editing({ draft }: { draft: Draft }) {
   const editor = useDraftEditor(draft);
   const { document, change, kept } = editor;
   const [tab, setTab] = useState<Tab>('steps');
-  useRestore(draft, editor);
   const model = useMemo(() => createModel(document), [document]);
   const list = <
     K extends
@@ -174,18 +173,7 @@ function Editing({ draft }: { draft: Draft }) {
           {tab === 'publish' ? <PublishPane draft={draft} editor={editor} /> : null}
         </TabPanel>
       </Page>
-      <Dialog
-        open={kept.state === 'stale'}
-        title="Another window saved this plan first. Which one goes on?"
-        onClose={() => editor.choose('other')}
-        keep="Take the other"
-        action={{ label: 'Keep mine', onPress: () => editor.choose('mine') }}
-      >
-        <Text>
-          What you have here is kept in this browser until you choose. Keeping yours puts it over
-          the other.
-        </Text>
-      </Dialog>
+      <StaleChoice key={kept.state} kept={kept} choose={editor.choose} />
     </>
   );
 }
@@ -273,13 +261,39 @@ function StepsTab({
   );
 }
 
-/** What a closed tab left unsaved is taken up again. */
-function useRestore(draft: Draft, { change }: DraftEditor) {
-  useEffect(() => {
-    void readLocal(draft.id).then((local) => {
-      if (!local) return;
-      if (JSON.stringify(local) === JSON.stringify(draft.document)) void dropLocal(draft.id);
-      else change(() => local);
-    });
-  }, [draft, change]);
+interface StaleChoiceProps {
+  kept: Kept;
+  choose: (which: 'mine' | 'other') => void;
+}
+
+/** Two versions of one plan: the person chooses, now or later; nothing is lost meanwhile. */
+function StaleChoice({ kept, choose }: StaleChoiceProps) {
+  const [later, setLater] = useState(false);
+  if (kept.state !== 'stale') return null;
+  if (later) {
+    return (
+      <Banner kind="risk" action={{ label: 'Choose now', onPress: () => setLater(false) }}>
+        Another window saved this plan first. What you change is kept in this browser only.
+      </Banner>
+    );
+  }
+  return (
+    <Dialog
+      open
+      title="Another window saved this plan first. Which one goes on?"
+      onClose={() => setLater(true)}
+      keep="Decide later"
+      action={{ label: 'Keep mine', onPress: () => choose('mine') }}
+    >
+      <Stack gap={12}>
+        <Text>
+          What you have here is kept in this browser until you choose. Keeping yours puts it over
+          the other; taking the other lets go of yours.
+        </Text>
+        <Row>
+          <Button label="Take the other" onPress={() => choose('other')} />
+        </Row>
+      </Stack>
+    </Dialog>
+  );
 }

@@ -1,5 +1,4 @@
 import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
-import { v7 as uuid } from 'uuid';
 import {
   createDraft,
   deleteDraft,
@@ -32,8 +31,12 @@ export const useDraft = (planId: string) =>
 export function useCreateDraft() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (body: { title: string; units: 'mm' | 'in'; document?: PlanDocument }) =>
-      call(createDraft, { body: { id: uuid(), ...body } }),
+    mutationFn: (body: {
+      id: string;
+      title: string;
+      units: 'mm' | 'in';
+      document?: PlanDocument;
+    }) => call(createDraft, { body }),
     onSuccess: () => void client.invalidateQueries({ queryKey: keys.drafts, exact: true }),
   });
 }

@@ -1,6 +1,7 @@
 import { useRouter } from 'expo-router';
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import { View } from 'react-native';
+import { v7 as uuid } from 'uuid';
 import { type DraftCard } from '../../shared/api/plans';
 import { SignedIn } from '../account/signed-in';
 import { tell } from '../data/problems';
@@ -103,6 +104,8 @@ function PlanLine({ card }: { card: DraftCard }) {
 function Begin() {
   const router = useRouter();
   const create = useCreateDraft();
+  // One id for one plan, however often it has to be sent.
+  const id = useRef(uuid());
   const [title, setTitle] = useState('');
   const [units, setUnits] = useState<'mm' | 'in'>('mm');
   const [fault, setFault] = useState<string | undefined>();
@@ -110,7 +113,7 @@ function Begin() {
     setFault(title.trim() === '' ? 'Give the plan a title.' : undefined);
     if (title.trim() === '') return;
     create.mutate(
-      { title: title.trim(), units },
+      { id: id.current, title: title.trim(), units },
       { onSuccess: (draft) => router.push(`/drafting/${draft.id}`) },
     );
   };

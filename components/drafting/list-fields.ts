@@ -1,3 +1,4 @@
+import { v7 as uuid } from 'uuid';
 import {
   displayMm,
   parseCheck,
@@ -34,11 +35,27 @@ import {
   type Tool,
 } from '../../shared/plan/document';
 import { type PlanModel, verdictWord } from '../../shared/plan/model';
+import { limits } from '../../shared/api/limits';
 import { nextLetter } from '../../shared/plan/facts';
 import { type ListField, type ListFields } from './list-editor';
 
 const options = (values: readonly string[]) =>
   values.map((value) => ({ value, label: value.replace(/-/g, ' ') }));
+
+const long: Record<string, number> = {
+  where: limits.note,
+  why: limits.note,
+  how: limits.note,
+  note: limits.note,
+  instead: limits.note,
+  text: limits.note,
+  expression: limits.expression,
+  url: limits.url,
+  symbol: limits.symbol,
+  mark: 4,
+};
+/** The most characters a field of an element holds. */
+const mostOf = (key: string): number => long[key] ?? limits.name;
 
 /** A text field of an element. */
 function text<T, K extends keyof T & string>(
@@ -50,16 +67,21 @@ function text<T, K extends keyof T & string>(
     key,
     label,
     get: (item) => String(item[key] ?? ''),
-    set: (item, value) => ({ ...item, [key]: value }),
+    set: (item, value) => ({ ...item, [key]: value.slice(0, mostOf(key)) }),
     ...more,
   };
 }
 const choice = <T, K extends keyof T & string>(key: K, label: string, values: readonly string[]) =>
   text<T, K>(key, label, { options: options(values) });
+/** A whole number of at least one; typed to its end before it counts. */
 const whole = <T, K extends keyof T & string>(key: K, label: string) =>
   text<T, K>(key, label, {
-    set: (item, value) => ({ ...item, [key]: Math.max(1, Math.round(Number(value)) || 1) }),
+    lazy: true,
+    set: (item, value) => ({ ...item, [key]: Number(value) }),
+    fault: (value) =>
+      /^[1-9]\d{0,3}$/.test(value.trim()) ? undefined : 'A whole number from 1 to 9999.',
   });
+const address = /^https?:\/\/[^\s/]+\.[^\s]+$/;
 
 /** A figure alone takes the plan's unit; anything else is an expression. */
 const expressionFault = (document: PlanDocument) => (value: string) => {
@@ -193,11 +215,12 @@ export const stockFields = (document: PlanDocument): ListFields<Stock> => ({
         ...s,
         sizes: [
           {
-            id: s.sizes[0]?.id ?? s.id,
+            id: s.sizes[0]?.id ?? uuid(),
             width: s.sizes[0]?.width ?? '',
             price: s.sizes[0]?.price,
             length,
           },
+          ...s.sizes.slice(1),
         ],
       }),
     },
@@ -211,11 +234,12 @@ export const stockFields = (document: PlanDocument): ListFields<Stock> => ({
         ...s,
         sizes: [
           {
-            id: s.sizes[0]?.id ?? s.id,
+            id: s.sizes[0]?.id ?? uuid(),
             length: s.sizes[0]?.length ?? '',
             price: s.sizes[0]?.price,
             width,
           },
+          ...s.sizes.slice(1),
         ],
       }),
     },
@@ -266,8 +290,8 @@ export const linkFields: ListFields<PlanLink> = {
   fields: [
     text('title', 'Title'),
     text('url', 'Address', {
-      fault: (v) =>
-        /^https?:\/\/\S+\.\S+/.test(v) ? undefined : 'An address begins with https://',
+      lazy: true,
+      fault: (v) => (address.test(v) ? undefined : 'An address begins with https://'),
     }),
     {
       key: 'onSale',
@@ -335,8 +359,8 @@ export const creditFields: ListFields<Credit> = {
   fields: [
     text('text', 'Whose method or design it builds on'),
     text('url', 'Address', {
-      fault: (v) =>
-        v === '' || /^https?:\/\/\S+\.\S+/.test(v) ? undefined : 'An address begins with https://',
+      lazy: true,
+      fault: (v) => (v === '' || address.test(v) ? undefined : 'An address begins with https://'),
     }),
   ],
 };

@@ -1,5 +1,6 @@
 import { useRouter } from 'expo-router';
 import { useState } from 'react';
+import { v7 as uuid } from 'uuid';
 import { limits } from '../../shared/api/limits';
 import { exportPlan, importPlan, type ImportFault } from '../../shared/plan/interchange';
 import { type PlanDocument } from '../../shared/plan/document';
@@ -48,7 +49,7 @@ export function BringPlanFile() {
     }
     const { document } = imported;
     create.mutate(
-      { title: document.title || 'Untitled', units: document.units, document },
+      { id: uuid(), title: document.title || 'Untitled', units: document.units, document },
       { onSuccess: (draft) => router.push(`/drafting/${draft.id}`) },
     );
   };

@@ -25,9 +25,11 @@ export function PublishPane({ draft, editor }: { draft: Draft; editor: DraftEdit
   const sheet = useMemo(() => checkSheet(editor.document), [editor.document]);
   const [reasons, setReasons] = useState<Record<string, string>>({});
   const [note, setNote] = useState('');
+  const [unsaved, setUnsaved] = useState(false);
   const failing = sheet.rows.filter((row) => row.verdict === 'fails');
   const send = async () => {
-    await editor.save();
+    setUnsaved(false);
+    if (!(await editor.saveNow())) return setUnsaved(true);
     publish.mutate(
       {
         version: editor.version(),
@@ -75,6 +77,12 @@ export function PublishPane({ draft, editor }: { draft: Draft; editor: DraftEdit
       </Section>
       <Section>
         <Heading level={2}>Publish</Heading>
+        {unsaved ? (
+          <Banner kind="fails">
+            The draft is not saved yet, so nothing was published. It is kept here; see above what
+            stands in the way, then publish again.
+          </Banner>
+        ) : null}
         {publish.isError ? <Banner kind="fails">{tell(publish.error).text}</Banner> : null}
         <TextArea label="What is new in this revision" value={note} onChange={setNote} />
         <Row>

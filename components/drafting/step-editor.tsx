@@ -1,5 +1,7 @@
 import { useState, type ReactNode } from 'react';
 import { v7 as uuid } from 'uuid';
+import { NumberField } from './number-field';
+import { StepWaits } from './step-waits';
 import { limits } from '../../shared/api/limits';
 import { type Heard, type PlanDocument, type Step } from '../../shared/plan/document';
 import { looseNames, shownText, storedText } from '../../shared/plan/references';
@@ -39,7 +41,6 @@ export interface StepEditorProps {
 export function StepEditor(props: StepEditorProps) {
   const { step, document, onChange, onRemove } = props;
   const set = (part: Partial<Step>) => onChange({ ...step, ...part });
-  const wait = step.waits[0];
   return (
     <Stack gap={12} style={{ maxWidth: 640 }}>
       <TextField
@@ -52,11 +53,10 @@ export function StepEditor(props: StepEditorProps) {
         key={`${step.stretches[0]?.start ?? ''}-${step.stretches[0]?.end ?? ''}`}
         {...props}
       />
-      <TextField
+      <NumberField
         label="Hands on, minutes"
-        inputMode="decimal"
-        value={String(step.handsOn)}
-        onChange={(text) => set({ handsOn: Math.max(0, Number(text) || 0) })}
+        value={step.handsOn}
+        onChange={(handsOn) => set({ handsOn })}
       />
       <TextArea
         label="Cautions, one a line"
@@ -73,29 +73,7 @@ export function StepEditor(props: StepEditorProps) {
           })
         }
       />
-      <TextField
-        label="Wait afterwards, minutes"
-        inputMode="decimal"
-        value={wait ? String(wait.minutes) : ''}
-        onChange={(text) =>
-          set({
-            waits:
-              Number(text) > 0
-                ? [
-                    {
-                      ...(wait ?? {
-                        id: uuid(),
-                        what: '',
-                        nextMayStart: false,
-                        kind: 'other' as const,
-                      }),
-                      minutes: Number(text),
-                    },
-                  ]
-                : [],
-          })
-        }
-      />
+      <StepWaits step={step} onChange={onChange} />
       {props.photos}
       <MadeHere step={step} document={document} set={set} />
       <HeardList {...props} />
@@ -254,7 +232,7 @@ function Stretch({ step, now, onMark, onChange }: StepEditorProps) {
     const start = readClock(a);
     const end = readClock(b);
     if (start !== null && end !== null && end > start)
-      onChange({ ...step, stretches: [{ start, end }] });
+      onChange({ ...step, stretches: [{ start, end }, ...step.stretches.slice(1)] });
   };
   const fault = (text: string) =>
     text === '' || readClock(text) !== null ? undefined : 'A time is minutes and seconds, as 1:28.';

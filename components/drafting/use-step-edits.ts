@@ -13,7 +13,7 @@ export function withMark(step: Step, which: 'start' | 'end', at: number): Step {
     which === 'start'
       ? { start: at, end: Math.max(known.end, at + shortest) }
       : { start: Math.min(known.start, Math.max(0, at - shortest)), end: Math.max(at, shortest) };
-  return { ...step, stretches: [stretch] };
+  return { ...step, stretches: [stretch, ...step.stretches.slice(1)] };
 }
 
 /** Takes a step out of its place and puts it at another. */

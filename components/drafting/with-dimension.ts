@@ -1,4 +1,5 @@
 import { v7 as uuid } from 'uuid';
+import { limits } from '../../shared/api/limits';
 import { dimensionSchema, type Heard, type PlanDocument } from '../../shared/plan/document';
 
 /** A symbol nobody has yet, from the words around a figure. */
@@ -19,7 +20,7 @@ export function withDimension(document: PlanDocument, stepId: string, heard: Hea
   const symbol = freeSymbol(document, 'heard_');
   const dimension = dimensionSchema.parse({
     id: uuid(),
-    name: heard.words,
+    name: heard.words.slice(0, limits.name),
     symbol,
     origin: 'given',
     expression: heard.value.text,
