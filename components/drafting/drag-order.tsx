@@ -25,15 +25,24 @@ export function DragHandle({ id, label }: { id: string; label: string }) {
 /** Where a dragged step can be dropped: it takes this place. */
 export function DropPlace({
   onDrop,
+  onMove,
   children,
 }: {
   onDrop: (id: string) => void;
+  /** Alt with up and down, from anywhere in the row. */
+  onMove: (by: -1 | 1) => void;
   children: ReactNode;
 }) {
   const [over, setOver] = useState(false);
   return (
     <div
       style={{ borderTop: `${line.thick}px solid ${over ? colour.blue : 'transparent'}` }}
+      onKeyDown={(event) => {
+        const by = event.key === 'ArrowUp' ? -1 : event.key === 'ArrowDown' ? 1 : 0;
+        if (!event.altKey || by === 0) return;
+        event.preventDefault();
+        onMove(by);
+      }}
       onDragOver={(event) => {
         if (!event.dataTransfer.types.includes(kind)) return;
         event.preventDefault();

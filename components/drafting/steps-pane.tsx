@@ -82,7 +82,7 @@ export function StepsPane({ editor, place, cues, open, setOpen }: StepsPaneProps
       <View role="list" aria-label="Steps">
         {document.steps.map((step, i) => (
           <View key={step.id} role="listitem">
-            <DropPlace onDrop={(id) => moveTo(id, i)}>
+            <DropPlace onDrop={(id) => moveTo(id, i)} onMove={(by) => move(step.id, by)}>
               <Stack gap={12} style={{ paddingVertical: 8 }}>
                 <StepLine
                   step={step}

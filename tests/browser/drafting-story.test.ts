@@ -49,6 +49,14 @@ describe('a creator makes a plan of a clip and its captions', () => {
       await page.getByRole('button', { name: 'Open step 1' }).waitFor();
       expect(await axe(page)).toEqual([]);
 
+      // The order changes by Alt with an arrow, and back.
+      const first = page.getByRole('list', { name: 'Steps' }).getByRole('listitem').first();
+      const was = await first.innerText();
+      await first.getByRole('button', { name: /Open step 1/ }).press('Alt+ArrowDown');
+      expect(await first.innerText()).not.toBe(was);
+      await page.getByRole('button', { name: 'Open step 2' }).press('Alt+ArrowUp');
+      expect(await first.innerText()).toBe(was);
+
       // A photo on a step, with its words; the check sheet asked for them beside the steps.
       await page.getByRole('button', { name: 'Open step 1' }).click();
       const picture = await sharp({
