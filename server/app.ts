@@ -9,6 +9,7 @@ import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
 import { v7 as uuid } from 'uuid';
 import { limits } from '../shared/api/limits';
+import { planJsonSchema } from '../shared/plan/interchange';
 import { type Deps } from './deps';
 import { registerFeatures } from './features';
 import { headFor } from './features/plans/plans.head';
@@ -72,6 +73,10 @@ function apiRouter(deps: Deps): Router {
   });
   api.get('/openapi.json', (_req, res) => {
     res.json(openApi());
+  });
+  const planSchema = planJsonSchema();
+  api.get('/plan-schema.json', (_req, res) => {
+    res.type('application/schema+json').json(planSchema);
   });
   registerFeatures(api, deps);
   api.use((req) => {

@@ -72,6 +72,20 @@ describe('every route', () => {
   });
 });
 
+it('publishes the OpenAPI document and the schema of a plan', async () => {
+  const open = (await app.anonymous().get('/api/openapi.json')).body as {
+    openapi: string;
+    paths: Record<string, unknown>;
+  };
+  expect(open.openapi).toBe('3.1.0');
+  expect(Object.keys(open.paths)).toContain('/api/plans/{slug}');
+  const schema = (await app.anonymous().get('/api/plan-schema.json')).body as {
+    title: string;
+    properties: object;
+  };
+  expect(Object.keys(schema.properties)).toContain('dimensions');
+});
+
 describe('the environment', () => {
   it('names every fault at once', () => {
     expect(() => readEnv({ DATABASE_URL: 'mysql://x', SESSION_SECRET: 'short' })).toThrow(
