@@ -1,5 +1,6 @@
 import { Slot } from 'expo-router';
 import { DataProvider } from '../components/data/data-provider';
+import { NewVersion } from '../components/service-worker/new-version';
 import { Announcer } from '../components/ui/announcer';
 
 export { RouteErrorBoundary as ErrorBoundary } from '../components/shell/error-boundary';
@@ -7,6 +8,7 @@ export { RouteErrorBoundary as ErrorBoundary } from '../components/shell/error-b
 export default function RootLayout() {
   return (
     <DataProvider>
+      <NewVersion />
       <Slot />
       <Announcer />
     </DataProvider>
