@@ -130,10 +130,7 @@ function OneReading({ dimension, state, values, add, choose, onDone }: OneReadin
           help={unit === 'in' ? 'As 2 3/4, 2-3/4 or 2.75' : 'As 17.6'}
           autoFocus
         />
-        <Keypad
-          unit={unit}
-          onKey={(key) => setText(key === 'erase' ? text.slice(0, -1) : `${text}${key}`)}
-        />
+        <Keypad unit={unit} value={text} onChange={setText} />
         <Select
           label="With"
           options={instruments.map((value) => ({ value, label: value.replace('-', ' ') }))}
