@@ -1,6 +1,11 @@
 import { z } from 'zod';
 import { documentVersion, planDocumentSchema, type PlanDocument } from '../document';
 import { upgrades, type Upgrade } from '../upgrade';
+import { deadReferences } from './dead-references';
+import { pathText } from './path-text';
+
+export { deadReferences, type DeadReference } from './dead-references';
+export { pathText } from './path-text';
 
 /** One fault of a plan file: where it is, from the root, and what is wrong. */
 export interface ImportFault {
@@ -15,19 +20,6 @@ const fault = (path: string, code: string, message: string): Imported => ({
   ok: false,
   faults: [{ path, code, message }],
 });
-
-/** `steps[2].stretches[0].end`. */
-export function pathText(path: readonly PropertyKey[]): string {
-  return path.reduce<string>(
-    (text, part) =>
-      typeof part === 'number'
-        ? `${text}[${part}]`
-        : text === ''
-          ? String(part)
-          : `${text}.${String(part)}`,
-    '',
-  );
-}
 
 /** Ids that stand twice among elements that must differ. */
 function repeatedIds(document: PlanDocument): ImportFault[] {
@@ -53,43 +45,6 @@ function repeatedIds(document: PlanDocument): ImportFault[] {
     }
   };
   visit(document, []);
-  return faults;
-}
-
-/** References by id that lead nowhere. */
-function deadReferences(document: PlanDocument): ImportFault[] {
-  const dimensions = new Set(document.dimensions.map((d) => d.id));
-  const parts = new Set(document.parts.map((p) => p.id));
-  const checks = new Set(document.checks.map((c) => c.id));
-  const stock = new Set(document.stock.map((s) => s.id));
-  const faults: ImportFault[] = [];
-  const need = (set: ReadonlySet<string>, id: string, path: PropertyKey[], what: string) => {
-    if (!set.has(id))
-      faults.push({
-        path: pathText(path),
-        code: 'reference/dead',
-        message: `There is no ${what} with this id.`,
-      });
-  };
-  document.parts.forEach(
-    (p, i) => p.stockId && need(stock, p.stockId, ['parts', i, 'stockId'], 'stock'),
-  );
-  document.steps.forEach((s, i) => {
-    s.takes.forEach((id, n) => need(dimensions, id, ['steps', i, 'takes', n], 'dimension'));
-    s.holds.forEach((id, n) => need(dimensions, id, ['steps', i, 'holds', n], 'dimension'));
-    s.checks.forEach((id, n) => need(checks, id, ['steps', i, 'checks', n], 'check'));
-    s.parts.forEach(({ partId }, n) =>
-      need(parts, partId, ['steps', i, 'parts', n, 'partId'], 'part'),
-    );
-    for (const [, kind, id] of s.text.matchAll(/\{\{(dim|part):([0-9a-f-]{36})\}\}/g)) {
-      need(
-        kind === 'dim' ? dimensions : parts,
-        id ?? '',
-        ['steps', i, 'text'],
-        kind === 'dim' ? 'dimension' : 'part',
-      );
-    }
-  });
   return faults;
 }
 
@@ -133,7 +88,14 @@ export function importPlan(
       })),
     };
   }
-  const faults = [...repeatedIds(parsed.data), ...deadReferences(parsed.data)];
+  const faults = [
+    ...repeatedIds(parsed.data),
+    ...deadReferences(parsed.data).map(({ path, what }) => ({
+      path,
+      code: 'reference/dead',
+      message: `There is no ${what} with this id.`,
+    })),
+  ];
   return faults.length > 0 ? { ok: false, faults } : { ok: true, document: parsed.data };
 }
 

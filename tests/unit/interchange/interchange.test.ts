@@ -1,6 +1,7 @@
 import { builtDemoPlans } from '../../../server/demo';
-import { type PlanDocument } from '../../../shared/plan/document';
+import { actionSchema, type PlanDocument } from '../../../shared/plan/document';
 import { exportPlan, importPlan, pathText, planJsonSchema } from '../../../shared/plan/interchange';
+import { idOf } from '../model/plan';
 
 const plans = builtDemoPlans().map(({ key, built }) => [key, built.document] as const);
 const board = plans[0]![1];
@@ -38,6 +39,53 @@ describe('a plan as a file', () => {
     const dead = { ...board, parts: board.parts.slice(1) };
     expect(faultsOf(dead).every((f) => f.code === 'reference/dead')).toBe(true);
     expect(faultsOf(dead).length).toBeGreaterThan(0);
+  });
+
+  it('names a reference that leads nowhere wherever it stands', () => {
+    const gone = board.id;
+    const first = board.steps[0]!;
+    const step = {
+      ...first,
+      toolIds: [gone],
+      photoIds: [gone],
+      after: [gone],
+      heard: [{ ...first.heard[0]!, dimensionId: gone }],
+      actions: [
+        actionSchema.parse({
+          id: idOf(9, 1),
+          do: 'cut',
+          machine: 'drill',
+          kind: 'drilling',
+          partIds: [gone],
+        }),
+        actionSchema.parse({ id: idOf(9, 2), do: 'fasten', hardwareId: gone, intoPartId: gone }),
+        actionSchema.parse({ id: idOf(9, 3), do: 'finish', consumableId: gone }),
+      ],
+    };
+    const flow = [
+      {
+        id: idOf(9, 4),
+        kind: 'repeat',
+        fromStepId: gone,
+        toStepId: first.id,
+        untilCheckId: gone,
+        atMost: 2,
+      },
+    ];
+    expect(
+      faultsOf({ ...board, steps: [step, ...board.steps.slice(1)], flow }).map((f) => f.path),
+    ).toEqual([
+      'steps[0].photoIds[0]',
+      'steps[0].toolIds[0]',
+      'steps[0].after[0]',
+      'steps[0].heard[0].dimensionId',
+      'steps[0].actions[0].partIds[0]',
+      'steps[0].actions[1].hardwareId',
+      'steps[0].actions[1].intoPartId',
+      'steps[0].actions[2].consumableId',
+      'flow[0].fromStepId',
+      'flow[0].untilCheckId',
+    ]);
   });
 
   it.each([
