@@ -6,6 +6,7 @@ import { dropEntries, retryRefused } from '../data/outbox';
 import { useOutbox } from '../data/outbox-hooks';
 import { tell } from '../data/problems';
 import { PageHead } from '../shell/page-head';
+import { useDropStrays } from '../service-worker/use-kept';
 import { Banner } from '../ui/banner';
 import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
@@ -29,6 +30,7 @@ export function BenchScreen() {
 
 function Copies({ personId }: { personId: string }) {
   const copies = useCopies();
+  useDropStrays(copies.isFetchedAfterMount ? copies.data?.items : undefined);
   const router = useRouter();
   return (
     <>

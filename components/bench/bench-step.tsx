@@ -7,6 +7,7 @@ import { ClipPlayer } from '../plans/clip-player';
 import { type PlanValues } from '../plans/plan-model';
 import { StepPhotos } from '../plans/step-photos';
 import { referencesOf } from '../plans/step-references';
+import { KeptFiles } from '../service-worker/kept-files';
 import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
 import { Icon } from '../ui/icon';
@@ -95,6 +96,7 @@ export function BenchStep(props: BenchStepProps) {
       {state.ticks.has(step.id) ? <Undo {...props} /> : null}
       <Units />
       <Notes key={`notes-${step.id}`} {...props} />
+      <KeptFiles copy={copy} />
     </Stack>
   );
 }

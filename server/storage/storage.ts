@@ -22,6 +22,8 @@ export interface Storage {
   ensureBucket(): Promise<void>;
   put(key: string, body: Buffer | Readable, file: StoredFile): Promise<void>;
   has(key: string): Promise<boolean>;
+  /** Length in bytes; throws when there is no such file. */
+  size(key: string): Promise<number>;
   get(key: string): Promise<Buffer>;
   remove(key: string): Promise<void>;
   /** A signed address on the media origin that stays the same within a window of half an hour. */
@@ -70,6 +72,9 @@ export function makeStorage(env: Env): Storage {
           return false;
         throw error;
       }
+    },
+    async size(Key) {
+      return (await s3.send(new HeadObjectCommand({ Bucket, Key }))).ContentLength ?? 0;
     },
     async get(Key) {
       const { Body } = await s3.send(new GetObjectCommand({ Bucket, Key }));

@@ -17,7 +17,11 @@ async function maySee(deps: Deps, hash: string, person: PersonEntity | null): Pr
   return rows.length > 0;
 }
 
-/** `/media/<hash>/<rendition>`: asks for permission, then leads to a signed address on the media origin. */
+/**
+ * `/media/<hash>/<rendition>`: asks for permission, then leads to a signed address on the media origin.
+ * HEAD is answered here with type and length (a signed address is good for GET only), so that a browser
+ * can say how much it would keep.
+ */
 export function registerMediaFiles(app: Express, deps: Deps): void {
   app.get('/media/:hash/:rendition', async (req, res) => {
     const { hash, rendition } = req.params;
@@ -28,6 +32,11 @@ export function registerMediaFiles(app: Express, deps: Deps): void {
     if (!media || !file || !(await maySee(deps, hash, personOf(req))))
       throw missing('That picture or clip');
     res.set('Cache-Control', 'private, max-age=900');
+    if (req.method === 'HEAD') {
+      const bytes = await deps.storage.size(file.key);
+      res.type(file.type).set('Content-Length', String(bytes)).end();
+      return;
+    }
     res.redirect(302, await deps.storage.signedUrl(file.key, file.type, deps.now()));
   });
 }
