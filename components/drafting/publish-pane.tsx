@@ -22,7 +22,7 @@ const keyOf = (row: SheetRow) => `${row.rule}/${row.place.elementId ?? ''}`;
 export function PublishPane({ draft, editor }: { draft: Draft; editor: DraftEditor }) {
   const router = useRouter();
   const publish = usePublish(draft.id);
-  const sheet = useMemo(() => checkSheet(editor.document), [editor.document]);
+  const sheet = useMemo(() => checkSheet(editor.document, undefined, 'publish'), [editor.document]);
   const [reasons, setReasons] = useState<Record<string, string>>({});
   const [note, setNote] = useState('');
   const [unsaved, setUnsaved] = useState(false);

@@ -58,7 +58,7 @@ async function run(argv: string[]): Promise<number> {
         console.error(`${fault.path || 'the file'}: ${fault.message} (${fault.code})`);
     return 2;
   }
-  const sheet = checkSheet(imported.document);
+  const sheet = checkSheet(imported.document, undefined, 'publish');
   const failing = sheet.rows.filter((row) => row.verdict === 'fails').length;
   if (json)
     console.log(

@@ -1,41 +1,27 @@
-import { type PlanDocument, type Step } from './document';
+import { type PlanDocument } from './document';
+import { elapsedOf, scheduleOf } from './schedule';
 
 /** What lists, filters and the plan page say about a plan at a glance; derived, never stored by hand. */
 export interface PlanFacts {
   steps: number;
   /** Hands-on minutes, added up. */
   handsOn: number;
-  /** Minutes along the steps in order, waits that hold up the next step included. */
+  /** Minutes along the longest chain, waits included. */
   elapsed: number;
   /** Machine classes that are needed and have no "instead". */
   machines: string[];
   clipDuration: number | null;
 }
 
-/** Minutes a step holds the next one up beyond its own work. */
-function holdUp(step: Step): number {
-  return step.waits.reduce(
-    (most, wait) => (wait.nextMayStart ? most : Math.max(most, wait.minutes)),
-    0,
-  );
-}
-
 /** Works out the facts of a plan. A wait that lets the next step start counts only if it outlasts the rest. */
 export function planFacts(document: PlanDocument): PlanFacts {
-  let clock = 0;
-  let latest = 0;
-  for (const step of document.steps) {
-    clock += step.handsOn;
-    for (const wait of step.waits) latest = Math.max(latest, clock + wait.minutes);
-    clock += holdUp(step);
-  }
   const machines = document.tools
     .filter((tool) => tool.needed && tool.instead === '' && tool.machine !== 'hand-tool')
     .map((tool) => tool.machine);
   return {
     steps: document.steps.length,
     handsOn: document.steps.reduce((sum, step) => sum + step.handsOn, 0),
-    elapsed: Math.max(clock, latest),
+    elapsed: elapsedOf(scheduleOf(document)),
     machines: [...new Set(machines)],
     clipDuration: document.clip.source === 'none' ? null : document.clip.duration,
   };

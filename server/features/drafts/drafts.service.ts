@@ -132,7 +132,9 @@ type PublishBody = z.output<NonNullable<(typeof publishPlan)['body']>>;
 
 /** Failing musts need a reason each; the rest is refused with the list. */
 function overridesFor(document: PlanDocument, body: PublishBody): Override[] {
-  const failing = checkSheet(document).rows.filter((row) => row.verdict === 'fails');
+  const failing = checkSheet(document, undefined, 'publish').rows.filter(
+    (row) => row.verdict === 'fails',
+  );
   const reasonFor = (rule: string, elementId: string | null) =>
     body.overrides.find((o) => o.rule === rule && o.elementId === elementId)?.reason;
   const open = failing.filter((row) => reasonFor(row.rule, row.place.elementId) === undefined);

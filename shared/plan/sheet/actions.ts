@@ -82,6 +82,13 @@ const holding = new Set([
 /** Does something other than a hand hold or feed the work? */
 export const isHeld = (cut: Cut): boolean => cut.heldBy.some((by) => holding.has(by));
 
+const replacing = new Set(['feather-board', 'hold-down', 'tunnel', 'jig', 'clamp', 'push-block']);
+/** Is something named that keeps hands away where the machine's guard cannot pass? */
+export const guardReplaced = (cut: Cut): boolean =>
+  cut.guardInstead.trim() !== '' || cut.heldBy.some((by) => replacing.has(by));
+
+export const machineWords = (machine: string): string => machine.replaceAll('-', ' ');
+
 export const throughCuts = new Set<Cut['kind']>(['through-rip', 'through-crosscut', 'mitre-cut']);
 export const raisedCuts = new Set<Cut['kind']>(['plunge', 'raised-blade']);
 export const grooveCuts = new Set<Cut['kind']>(['groove', 'dado', 'rabbet']);

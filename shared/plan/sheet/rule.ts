@@ -27,6 +27,8 @@ export interface Finding {
   message: string;
   /** How to mend it, one sentence. */
   cure: string;
+  /** A figure typed in prose, as it stands there, and the dimension of the same value. */
+  figure?: { text: string; dimensionId: string | null };
 }
 
 /** One rule of the check sheet. It must be quiet unless it is right. */
@@ -34,6 +36,8 @@ export interface Rule {
   /** Stable, e.g. `parts/made`. */
   id: string;
   level: RuleLevel;
+  /** Its level when the plan is to be published, if that is another. */
+  toPublish?: RuleLevel;
   /** Where the rule comes from, for whoever asks. */
   source: string;
   run: (context: RuleContext) => Finding[];

@@ -6,7 +6,7 @@ export const board = builtDemoPlans()[0]!.built.document;
 const cart = builtDemoPlans()[1]!.built.document;
 let next = 0;
 export const id = () => `00000000-0000-7000-8000-${(next += 1).toString(16).padStart(12, '0')}`;
-const act = (input: Record<string, unknown>) => actionSchema.parse({ id: id(), ...input });
+export const act = (input: Record<string, unknown>) => actionSchema.parse({ id: id(), ...input });
 export const cut = (more: Record<string, unknown>) =>
   act({
     do: 'cut',
@@ -30,7 +30,7 @@ export const steps = (
 });
 export const found = (rule: string, document: PlanDocument) =>
   checkSheet(document).rows.filter((r) => r.rule === rule);
-const screw = (more: Record<string, unknown>) =>
+export const screw = (more: Record<string, unknown>) =>
   act({
     do: 'fasten',
     hardwareId: board.hardware[0]!.id,
@@ -41,7 +41,7 @@ const screw = (more: Record<string, unknown>) =>
     ...more,
   });
 
-type Row = [what: string, rule: string, trips: PlanDocument, quiet: PlanDocument];
+export type Row = [what: string, rule: string, trips: PlanDocument, quiet: PlanDocument];
 export const table: Row[] = [
   [
     'through rip with the guard off',
@@ -419,7 +419,12 @@ export const table: Row[] = [
       ...steps({
         3: { actions: [act({ do: 'glue', partIds: [board.parts[0]!.id], acrossGrain: true })] },
       }),
-      stock: board.stock.map((s) => ({ ...s, form: 'board' as const })),
+      stock: board.stock.map((s) => ({
+        ...s,
+        form: 'board' as const,
+        material: 'red oak',
+        name: 'Boards',
+      })),
     },
     steps({
       3: { actions: [act({ do: 'glue', partIds: [board.parts[0]!.id], acrossGrain: true })] },

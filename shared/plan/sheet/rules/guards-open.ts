@@ -1,5 +1,13 @@
 import { guardKey, walkGuards, type GuardedCut } from '../../guards';
-import { atStep, grooveCuts, isHeld, raisedCuts, throughCuts } from '../actions';
+import {
+  atStep,
+  grooveCuts,
+  guardReplaced,
+  machineWords,
+  raisedCuts,
+  throughCuts,
+} from '../actions';
+import { unnamedRemovals } from '../guard-words';
 import { type Finding, type Rule } from '../rule';
 
 const itemWords = {
@@ -18,9 +26,18 @@ function faultsOf({ cut, step, number, guards }: GuardedCut): Finding[] {
   const replaced = cut.guardInstead.trim() !== '';
   const found: Finding[] = [];
   const through = throughCuts.has(cut.kind);
-  for (const item of ['blade-guard', 'hood', 'anti-kickback'] as const) {
-    if (standing(item) === 'on') continue;
-    if (through && !replaced) {
+  const cannotPass =
+    cut.machine === 'table-saw' && (grooveCuts.has(cut.kind) || raisedCuts.has(cut.kind));
+  if (!through && !guardReplaced(cut) && (cannotPass || standing('blade-guard') !== 'on'))
+    found.push(
+      atStep(
+        step,
+        `Step ${number} makes a cut that the blade guard cannot stay on for and names nothing in its place.`,
+        'Name the feather board, hold-down, tunnel or cover on the jig that keeps hands away.',
+      ),
+    );
+  for (const item of ['blade-guard', 'hood', 'anti-kickback'] as const)
+    if (through && !replaced && standing(item) !== 'on')
       found.push(
         atStep(
           step,
@@ -28,16 +45,6 @@ function faultsOf({ cut, step, number, guards }: GuardedCut): Finding[] {
           `Put the ${itemWords[item]} back on before this cut, or name what replaces it.`,
         ),
       );
-    } else if (item === 'blade-guard' && !through && !replaced && !isHeld(cut)) {
-      found.push(
-        atStep(
-          step,
-          `Step ${number} cuts with the blade guard off and names nothing in its place.`,
-          'Name the feather board, hold-down, tunnel or jig that keeps hands away.',
-        ),
-      );
-    }
-  }
   for (const item of ['riving-knife', 'splitter'] as const) {
     const now = standing(item);
     if (through && now !== 'on') {
@@ -83,10 +90,17 @@ export const guardsOpen: Rule = {
     const left = walk.left.map(({ machine, item, standing, step }) =>
       atStep(
         step,
-        `The ${itemWords[item]} of the ${machine.replace('-', ' ')} is ${standing} and never put back.`,
+        `The ${itemWords[item]} of the ${machineWords(machine)} is ${standing} and never put back.`,
         'Add the moment it goes back on, at the latest in the last step.',
       ),
     );
-    return [...walk.cuts.flatMap(faultsOf), ...left].filter(once);
+    const unnamed = unnamedRemovals(document).map((number) =>
+      atStep(
+        document.steps[number - 1]!,
+        `Step ${number} takes a guard off, and nothing says that it goes back on.`,
+        'Name the guard among the actions of the step, off and back on.',
+      ),
+    );
+    return [...walk.cuts.flatMap(faultsOf), ...left, ...unnamed].filter(once);
   },
 };

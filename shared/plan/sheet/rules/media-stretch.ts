@@ -1,5 +1,4 @@
 import { type Finding, type Rule } from '../rule';
-import { stepName } from '../rule';
 
 export const mediaStretch: Rule = {
   id: 'media/stretch',
@@ -8,17 +7,32 @@ export const mediaStretch: Rule = {
   run: ({ document }) => {
     if (document.clip.source === 'none') return [];
     const { duration } = document.clip;
-    return document.steps.flatMap((step): Finding[] => {
-      const place = { in: 'steps' as const, elementId: step.id };
-      const bad = step.stretches.find((s) => s.end <= s.start || s.end > duration + 0.5);
-      if (!bad) return [];
-      return [
-        {
-          place,
-          message: `The stretch of ${stepName(document, step.id)} ${bad.end <= bad.start ? 'ends before it begins' : 'runs past the end of the clip'}.`,
-          cure: 'Set its in and out marks again.',
-        },
+    let before = 0;
+    return document.steps.flatMap((step, i): Finding[] => {
+      const found = (message: string, cure: string): Finding[] => [
+        { place: { in: 'steps', elementId: step.id }, message, cure },
       ];
+      const marks = 'Set its in and out marks again.';
+      if (step.stretches.some((s) => s.end <= s.start))
+        return found(`The stretch of step ${i + 1} ends before it begins.`, marks);
+      if (step.stretches.some((s) => s.end > duration + 0.5))
+        return found(`The stretch of step ${i + 1} runs past the end of the clip.`, marks);
+      const disorder = step.stretches.some((s, n) => s.start < (step.stretches[n - 1]?.start ?? 0));
+      if (disorder)
+        return found(
+          `The stretches of step ${i + 1} are out of order.`,
+          'Put them in the order of the clip.',
+        );
+      const first = step.stretches[0]?.start;
+      if (step.phase !== 'build' || first === undefined) return [];
+      const back = first < before - 0.5;
+      before = first;
+      return back
+        ? found(
+            `The clip of step ${i + 1} lies before that of the step above it.`,
+            'Check its marks, or say why the order of the steps is another.',
+          )
+        : [];
     });
   },
 };

@@ -1,6 +1,9 @@
 import { actionsOf, atStep, wordsOf } from '../actions';
 import { type Finding, type Rule } from '../rule';
 
+/** Finishes that dry by taking up oxygen, and heat up in a heap of rags as they do. */
+const oils = /\b(?:linseed|tung|danish|teak|boiled|hard.?wax) ?oil\b|\boil finish\b/i;
+
 export const safetyFinish: Rule = {
   id: 'safety/finish',
   level: 'should',
@@ -8,8 +11,15 @@ export const safetyFinish: Rule = {
   run: ({ document }) =>
     actionsOf(document, 'finish').flatMap(({ action, step, number }): Finding[] => {
       const words = wordsOf(step);
+      // Rags are cleared up at the end, perhaps in a step of their own.
+      const later = document.steps
+        .slice(number - 1)
+        .map(wordsOf)
+        .join(' ');
+      const finish = document.consumables.find((c) => c.id === action.consumableId);
+      const oily = action.oily || oils.test(finish?.name ?? '');
       const found: Finding[] = [];
-      if (action.oily && !/\brags?\b|\bcloths?\b/.test(words))
+      if (oily && !/\brags?\b|\bcloths?\b/.test(later))
         found.push(
           atStep(
             step,

@@ -1,8 +1,8 @@
+import { twoPeopleLift } from '../../../trade/shop.data';
 import { actionsOf, atStep, planWordsOf, wordsOf } from '../actions';
 import { type Finding, type Rule } from '../rule';
 
-/** Heavier than this two people lift, kg. Common practice, no source. */
-const twoPeople = 25;
+const load = /\b\d+(?:\.\d+)?\s?(?:kg|kilos?|kilograms?|lbs?|pounds?)\b/;
 
 export const safetyOverhead: Rule = {
   id: 'safety/overhead',
@@ -12,14 +12,14 @@ export const safetyOverhead: Rule = {
     const mounts = actionsOf(document, 'mount').flatMap(({ action, step, number }): Finding[] => {
       const words = wordsOf(step);
       const lacks = [
-        action.kg === undefined ? 'the load' : '',
+        action.kg === undefined && !load.test(words) ? 'the load' : '',
         action.intoStructure || /\b(?:studs?|structure|masonry|joists?)\b/.test(words)
           ? ''
           : 'that it is fixed into structure',
         action.servicesLookedFor || /\bpipes?\b/.test(words)
           ? ''
           : 'that pipes and cables are looked for',
-        (action.kg ?? 0) <= twoPeople || action.liftingHelp || step.people > 1
+        (action.kg ?? 0) <= twoPeopleLift || action.liftingHelp || step.people > 1
           ? ''
           : 'who helps to lift it',
       ].filter(Boolean);

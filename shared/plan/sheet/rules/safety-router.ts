@@ -1,13 +1,8 @@
-import { actionsOf, atStep, mm } from '../actions';
+import { routerSpeeds } from '../../../trade/shop.data';
+import { actionsOf, atStep, mm, wordsOf } from '../actions';
 import { type Finding, type Rule } from '../rule';
 
-/** Largest speed for a bit's diameter: over mm, rev/min. Common practice, no source; the bit's own mark wins. */
-const speeds = [
-  { over: 65, rpm: 12_000 },
-  { over: 50, rpm: 16_000 },
-  { over: 25, rpm: 18_000 },
-  { over: 0, rpm: 24_000 },
-] as const;
+const passes = /\bpass(?:es)?\b|\bat a time\b|\bshallow\b/;
 
 export const safetyRouter: Rule = {
   id: 'safety/router',
@@ -26,7 +21,9 @@ export const safetyRouter: Rule = {
           ),
         );
       const bit = mm(model(), action.bitDiameter);
-      const pass = mm(model(), action.depthPerPass);
+      const pass =
+        mm(model(), action.depthPerPass) ??
+        (passes.test(wordsOf(step)) ? null : mm(model(), action.depth));
       if (bit !== null && pass !== null && pass > bit + 1e-6)
         found.push(
           atStep(
@@ -35,7 +32,7 @@ export const safetyRouter: Rule = {
             'Take it in several passes, none deeper than the bit’s diameter.',
           ),
         );
-      const most = bit === null ? null : speeds.find((s) => bit > s.over)!.rpm;
+      const most = bit === null ? null : routerSpeeds.find((s) => bit > s.over)!.rpm;
       if (most !== null && action.rpm !== undefined && action.rpm > most)
         found.push(
           atStep(

@@ -1,32 +1,41 @@
+import { type PlanDocument, type Step } from '../../document';
+import { scheduleOf } from '../../schedule';
 import { type Finding, type Rule } from '../rule';
 
-/** Walks the steps in order: a step that loads a joint must come after every wait that is still open. */
+/** Minutes a joint of a step is not to be loaded for: its own waits, and what the label of its glue says. */
+function jointWait(document: PlanDocument, step: Step): number {
+  const waits = step.waits.filter((w) => w.kind === 'clamp' || w.kind === 'cure');
+  const labels = step.actions.flatMap((action) => {
+    const id = action.do === 'glue' ? action.consumableId : undefined;
+    const glue = document.consumables.find((c) => c.id === id);
+    return glue ? [glue.clamp ?? 0, glue.cure ?? 0] : [];
+  });
+  return Math.max(0, ...waits.map((w) => w.minutes), ...labels);
+}
+
+/** Walks the longest chain: a step that loads a joint comes after every wait that is still open. */
 export const timeCure: Rule = {
   id: 'time/cure',
   level: 'must',
-  source: 'glue labels: a joint is not loaded before its clamp time is over',
+  source:
+    'glue labels: a joint is not loaded before its clamp time, or its cure where given, is over',
   run: ({ document }) => {
-    const found: Finding[] = [];
-    let clock = 0;
-    let open: { until: number; step: number }[] = [];
-    document.steps.forEach((step, i) => {
-      if (step.loadsJoint) {
-        const early = open.find((w) => w.until > clock);
-        if (early) {
-          found.push({
-            place: { in: 'steps', elementId: step.id },
-            message: `Step ${i + 1} loads a joint while the wait of step ${early.step} still has ${Math.ceil(early.until - clock)} min to run.`,
-            cure: `Let step ${early.step} hold the next one up, or move step ${i + 1} back.`,
-          });
-        }
-      }
-      clock += step.handsOn;
-      for (const wait of step.waits)
-        if (wait.kind === 'clamp' || wait.kind === 'cure')
-          open.push({ until: clock + wait.minutes, step: i + 1 });
-      clock += step.waits.reduce((m, w) => (w.nextMayStart ? m : Math.max(m, w.minutes)), 0);
-      open = open.filter((w) => w.until > clock);
+    const slots = scheduleOf(document);
+    return slots.flatMap(({ step, start }, i): Finding[] => {
+      if (!step.loadsJoint) return [];
+      const open = slots
+        .slice(0, i)
+        .map((slot, n) => ({ number: n + 1, until: slot.end + jointWait(document, slot.step) }))
+        .filter(({ until }) => until > start + 1e-9)
+        .sort((a, b) => b.until - a.until)[0];
+      if (!open) return [];
+      return [
+        {
+          place: { in: 'steps', elementId: step.id },
+          message: `Step ${i + 1} loads a joint while the wait of step ${open.number} still has ${Math.ceil(open.until - start)} min to run.`,
+          cure: `Let step ${open.number} hold the next one up, name it under “after”, or move step ${i + 1} back.`,
+        },
+      ];
     });
-    return found;
   },
 };
