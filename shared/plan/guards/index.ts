@@ -72,14 +72,16 @@ function walkStep(step: Step, number: number, before: State, cuts: GuardedCut[])
  */
 export function walkGuards(document: PlanDocument): GuardWalk {
   const cuts: GuardedCut[] = [];
-  const groupOf = new Map<string, { flow: string; group: string }>();
+  const groupOf = new Map<string, { flow: string; group: string; groups: readonly string[] }>();
   for (const flow of document.flow) {
     if (flow.kind !== 'alternatives') continue;
+    const groups = flow.groups.map((group) => group.id);
     for (const group of flow.groups)
-      for (const id of group.stepIds) groupOf.set(id, { flow: flow.id, group: group.id });
+      for (const id of group.stepIds) groupOf.set(id, { flow: flow.id, group: group.id, groups });
   }
   let state: State = new Map();
   let branch: { flow: string; start: State; ends: Map<string, State> } | null = null;
+  // A group without steps here leaves everything as it was, so every group's end is its start at first.
   const close = () => {
     if (branch) state = worstOf([...branch.ends.values()]);
     branch = null;
@@ -93,7 +95,8 @@ export function walkGuards(document: PlanDocument): GuardWalk {
     }
     if (branch?.flow !== at.flow) {
       close();
-      branch = { flow: at.flow, start: state, ends: new Map() };
+      const start = state;
+      branch = { flow: at.flow, start, ends: new Map(at.groups.map((g) => [g, start])) };
     }
     const from = branch.ends.get(at.group) ?? branch.start;
     branch.ends.set(at.group, walkStep(step, number, from, cuts));
