@@ -24,20 +24,22 @@ export interface WatchedPage {
 }
 
 /** Debian's Chromium; several seconds of background work are switched off. */
+export const chromiumOptions = {
+  executablePath: '/usr/bin/chromium',
+  args: [
+    '--no-sandbox',
+    '--disable-gpu',
+    '--disable-dev-shm-usage',
+    '--disable-background-networking',
+    '--disable-component-update',
+    '--no-first-run',
+    '--disable-sync',
+    '--mute-audio',
+  ],
+};
+
 export function launchBrowser(): Promise<Browser> {
-  return chromium.launch({
-    executablePath: '/usr/bin/chromium',
-    args: [
-      '--no-sandbox',
-      '--disable-gpu',
-      '--disable-dev-shm-usage',
-      '--disable-background-networking',
-      '--disable-component-update',
-      '--no-first-run',
-      '--disable-sync',
-      '--mute-audio',
-    ],
-  });
+  return chromium.launch(chromiumOptions);
 }
 
 /** Signs a context in through the API, as the form would. */
