@@ -15,6 +15,14 @@ export const movementSeason: Rule = {
   source:
     'USDA Wood Handbook FPL-GTR-190, Eq. 13–2 and Table 13–5; four points of moisture content a year',
   run: ({ document, model }) => {
+    /** Parts glued edge to edge with their own kind make one wide panel. */
+    const panels = new Set(
+      document.steps.flatMap((step) =>
+        step.actions.flatMap((a) =>
+          a.do === 'glue' && !a.acrossGrain && a.partIds.length === 1 ? a.partIds : [],
+        ),
+      ),
+    );
     /** How much a part of solid wood swells and shrinks across, mm. */
     const moves = (id: string | undefined): number => {
       const part = document.parts.find((p) => p.id === id);
@@ -23,7 +31,8 @@ export const movementSeason: Rule = {
       const wood = `${stock.material} ${stock.name}`;
       if (manmade.test(wood)) return 0;
       const { length, width } = sizeOf(model(), part);
-      const across = (part.grain === 'width' ? length : width) ?? 0;
+      const one = (part.grain === 'width' ? length : width) ?? 0;
+      const across = panels.has(part.id) ? one * part.quantity : one;
       return movement(across, coefficientsOf(wood).tangential, 0, season);
     };
     return document.steps.flatMap((step, i) =>
