@@ -1,11 +1,8 @@
 import { useLocalSearchParams } from 'expo-router';
-import { useMemo, useState } from 'react';
+import { useState } from 'react';
 import { View } from 'react-native';
 import { type Draft } from '../../shared/api/plans';
-import { type Dimension, type PlanDocument } from '../../shared/plan/document';
-import { createModel, type PlanModel } from '../../shared/plan/model';
 import { type SheetRow } from '../../shared/plan/sheet';
-import { renameSymbol } from '../../shared/plan/rename';
 import { SignedIn } from '../account/signed-in';
 import { ApiProblem, tell } from '../data/problems';
 import { PageHead } from '../shell/page-head';
@@ -26,13 +23,13 @@ import {
   checkFields,
   consumableFields,
   creditFields,
-  dimensionFields,
   hardwareFields,
   linkFields,
   partFields,
   stockFields,
   toolFields,
 } from './list-fields';
+import { DimensionsTab } from './dimensions/dimensions-tab';
 import { ListEditor } from './list-editor';
 import { PublishPane } from './publish-pane';
 import { SheetPane } from './sheet-pane';
@@ -91,6 +88,7 @@ function Loaded({ planId }: { planId: string }) {
 const tabs = [
   { value: 'steps', label: 'Clip and steps' },
   { value: 'dimensions', label: 'Dimensions' },
+  { value: 'checks', label: 'Checks' },
   { value: 'parts', label: 'Parts and stock' },
   { value: 'tools', label: 'Tools and links' },
   { value: 'about', label: 'About' },
@@ -112,9 +110,15 @@ export function keptWords(kept: Kept): string {
 
 function Editing({ draft }: { draft: Draft }) {
   const editor = useDraftEditor(draft);
-  const { document, change, kept } = editor;
+  const { document, change, kept, model } = editor;
   const [tab, setTab] = useState<Tab>('steps');
-  const model = useMemo(() => createModel(document), [document]);
+  const [step, setStep] = useState<string | null>(null);
+  const [dimension, setDimension] = useState<string | null>(null);
+  const toPlace = ({ place: { in: list, elementId } }: SheetRow) => {
+    if (list === 'steps') setStep(elementId);
+    if (list === 'dimensions') setDimension(elementId);
+    setTab(list === 'steps' ? 'steps' : (tabOf[list] ?? 'about'));
+  };
   const list = <
     K extends
       'checks' | 'consumables' | 'credits' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links',
@@ -138,17 +142,19 @@ function Editing({ draft }: { draft: Draft }) {
           fill={false}
         />
         <TabPanel id="draft" value={tab}>
-          {tab === 'steps' ? <StepsTab editor={editor} model={model} onTab={setTab} /> : null}
+          {tab === 'steps' ? (
+            <StepsTab editor={editor} open={step} setOpen={setStep} onPlace={toPlace} />
+          ) : null}
           {tab === 'dimensions' ? (
-            <>
-              <ListEditor
-                title="Dimensions"
-                fields={dimensionFields(document, model)}
-                items={document.dimensions}
-                onChange={(dimensions) => change((d) => withDimensions(d, dimensions))}
-              />
-              <ListEditor title="Checks" fields={checkFields(model)} {...list('checks')} />
-            </>
+            <DimensionsTab
+              editor={editor}
+              chosen={dimension}
+              onChoose={setDimension}
+              onPlace={toPlace}
+            />
+          ) : null}
+          {tab === 'checks' ? (
+            <ListEditor title="Checks" fields={checkFields(model)} {...list('checks')} />
           ) : null}
           {tab === 'parts' ? (
             <>
@@ -178,21 +184,10 @@ function Editing({ draft }: { draft: Draft }) {
   );
 }
 
-/** A changed symbol is changed in every expression that uses it. */
-function withDimensions(document: PlanDocument, dimensions: Dimension[]): PlanDocument {
-  const before = new Map(document.dimensions.map((d) => [d.id, d.symbol]));
-  const changed = dimensions.find((d) => {
-    const known = before.get(d.id);
-    return known !== undefined && known !== d.symbol;
-  });
-  if (!changed) return { ...document, dimensions };
-  return renameSymbol(document, before.get(changed.id) ?? '', changed.symbol);
-}
-
 /** Where each list of the plan is edited. */
 const tabOf: Partial<Record<SheetRow['place']['in'], Tab>> = {
   dimensions: 'dimensions',
-  checks: 'dimensions',
+  checks: 'checks',
   parts: 'parts',
   stock: 'parts',
   hardware: 'parts',
@@ -200,17 +195,15 @@ const tabOf: Partial<Record<SheetRow['place']['in'], Tab>> = {
   links: 'tools',
 };
 
-/** Clip and captions at the left, the steps on the stick, the check sheet: three panes at a desk. */
-function StepsTab({
-  editor,
-  model,
-  onTab,
-}: {
+interface StepsTabProps {
   editor: DraftEditor;
-  model: PlanModel;
-  onTab: (tab: Tab) => void;
-}) {
-  const [open, setOpen] = useState<string | null>(null);
+  open: string | null;
+  setOpen: (id: string | null) => void;
+  onPlace: (row: SheetRow) => void;
+}
+
+/** Clip and captions at the left, the steps on the stick, the check sheet: three panes at a desk. */
+function StepsTab({ editor, open, setOpen, onPlace }: StepsTabProps) {
   const place = useClipPlace();
   const { clip } = editor.document;
   const hash = clip.source === 'none' ? undefined : clip.captions;
@@ -245,14 +238,7 @@ function StepsTab({
           width: 300,
           content: (
             <View style={{ padding: 4, paddingHorizontal: 12 }}>
-              <SheetPane
-                document={editor.document}
-                model={model}
-                onPlace={({ place: { in: list, elementId } }) => {
-                  if (list === 'steps') setOpen(elementId);
-                  else onTab(tabOf[list] ?? 'about');
-                }}
-              />
+              <SheetPane document={editor.document} model={editor.model} onPlace={onPlace} />
             </View>
           ),
         },

@@ -107,7 +107,8 @@ export function ListEditor<T extends { id: string }>({
   );
 }
 
-function OneField<T>({
+/** One field of an element, as its kind asks. */
+export function OneField<T>({
   field,
   item,
   onChange,

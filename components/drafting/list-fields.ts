@@ -1,16 +1,11 @@
 import { v7 as uuid } from 'uuid';
-import {
-  displayMm,
-  parseCheck,
-  parseExpression,
-  parseLength,
-  reservedWords,
-} from '../../shared/measure';
+import { parseCheck, parseExpression, parseLength, reservedWords } from '../../shared/measure';
 import {
   disclosures,
   grains,
   hardwareSchema,
   instruments,
+  kinds,
   linkSchema,
   machineClasses,
   origins,
@@ -19,7 +14,6 @@ import {
   stockSchema,
   symbolPattern,
   toolSchema,
-  dimensionSchema,
   checkSchema,
   consumableSchema,
   creditSchema,
@@ -74,12 +68,14 @@ function text<T, K extends keyof T & string>(
 const choice = <T, K extends keyof T & string>(key: K, label: string, values: readonly string[]) =>
   text<T, K>(key, label, { options: options(values) });
 /** A whole number of at least one; typed to its end before it counts. */
-const whole = <T, K extends keyof T & string>(key: K, label: string) =>
+const whole = <T, K extends keyof T & string>(key: K, label: string, most = 9999) =>
   text<T, K>(key, label, {
     lazy: true,
     set: (item, value) => ({ ...item, [key]: Number(value) }),
     fault: (value) =>
-      /^[1-9]\d{0,3}$/.test(value.trim()) ? undefined : 'A whole number from 1 to 9999.',
+      /^[1-9]\d{0,3}$/.test(value.trim()) && Number(value) <= most
+        ? undefined
+        : `A whole number from 1 to ${most}.`,
   });
 const address = /^https?:\/\/[^\s/]+\.[^\s]+$/;
 
@@ -98,67 +94,30 @@ const expressionFault = (document: PlanDocument) => (value: string) => {
 const optionalFault = (document: PlanDocument) => (value: string) =>
   value.trim() === '' ? undefined : expressionFault(document)(value);
 
-/** A dimension while it is closed: symbol, expression, value and worst case, or what is wrong. */
-function dimensionLine(d: Dimension, document: PlanDocument, model: PlanModel): string {
-  const state = model.dimensions.get(d.id);
-  const said = `${d.symbol} = ${d.expression}`;
-  if (state?.error) return `${said}: ${state.error.message}`;
-  if (!state?.value || state.kind !== 'length') return said;
-  const shown = displayMm(state.value.x, {
-    system: document.units,
-    instrument: 'calipers',
-    grid: 64,
-  });
-  const worst =
-    state.value.worst > 1e-9
-      ? `, worst ± ${displayMm(state.value.worst, { system: document.units, instrument: 'calipers', grid: 64 }).text}`
-      : '';
-  return d.origin === 'derived' ? `${said} = ${shown.text}${worst}` : `${said}${worst}`;
-}
-
-export const dimensionFields = (
-  document: PlanDocument,
-  model: PlanModel,
-): ListFields<Dimension> => ({
-  make: (id, n) =>
-    dimensionSchema.parse({
-      id,
-      name: `Dimension ${n + 1}`,
-      symbol: `d${n + 1}`,
-      origin: 'given',
-      expression: '',
-    }),
-  name: (d) => dimensionLine(d, document, model),
-  fields: [
-    text('name', 'Name'),
-    text('symbol', 'Symbol', {
-      mono: true,
-      lazy: true,
-      fault: (v, d) => {
-        if (!symbolPattern.test(v)) return 'A letter first, then letters, digits and _.';
-        if (reservedWords.has(v)) return `${v} is a word of the expressions. Choose another.`;
-        const other = document.dimensions.find((x) => x.symbol === v && x.id !== d.id);
-        return other ? `${other.name} has this symbol already.` : undefined;
-      },
-    }),
-    choice('origin', 'Origin', origins),
-    text('expression', 'Value or expression', { mono: true, fault: expressionFault(document) }),
-    {
-      key: 'tolerance',
-      label: 'Tolerance ±',
-      mono: true,
-      fault: optionalFault(document),
-      get: (d) => (d.tolerance.form === 'plus-minus' ? d.tolerance.by : ''),
-      set: (d, by) => ({
-        ...d,
-        tolerance: by.trim() === '' ? { form: 'none' } : { form: 'plus-minus', by },
-      }),
+/** A dimension's fields beside its figure and its tolerance, which have their own. */
+export const dimensionFields = (document: PlanDocument): readonly ListField<Dimension>[] => [
+  text('name', 'Name'),
+  text('symbol', 'Symbol', {
+    mono: true,
+    lazy: true,
+    fault: (v, d) => {
+      if (!symbolPattern.test(v)) return 'A letter first, then letters, digits and _.';
+      if (reservedWords.has(v)) return `${v} is a word of the expressions. Choose another.`;
+      const other = document.dimensions.find((x) => x.symbol === v && x.id !== d.id);
+      return other ? `${other.name} has this symbol already.` : undefined;
     },
-    choice('sense', 'Sense', senses),
-    choice('instrument', 'Measured with', instruments),
-    text('where', 'Where and how to measure'),
-  ],
-});
+  }),
+  choice('origin', 'Origin', origins),
+  choice('kind', 'Kind', kinds),
+  choice('sense', 'Sense', senses),
+  choice('instrument', 'Measured with', instruments),
+  whole('places', 'Readings asked for', 12),
+  choice('counts', 'Of several readings counts', ['mean', 'min', 'max']),
+  text('setting', 'Cut at one stop setting with others of this name', {
+    set: (d, v) => ({ ...d, setting: v === '' ? undefined : v.slice(0, limits.name) }),
+  }),
+  text('where', 'Where and how to measure'),
+];
 
 const stockChoices = (document: PlanDocument) => [
   { value: 'none', label: 'not said' },

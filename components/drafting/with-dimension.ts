@@ -1,6 +1,12 @@
 import { v7 as uuid } from 'uuid';
 import { limits } from '../../shared/api/limits';
-import { dimensionSchema, type Heard, type PlanDocument } from '../../shared/plan/document';
+import {
+  dimensionSchema,
+  type Dimension,
+  type Heard,
+  type PlanDocument,
+} from '../../shared/plan/document';
+import { renameSymbol } from '../../shared/plan/rename';
 
 /** A symbol nobody has yet, from the words around a figure. */
 export function freeSymbol(document: PlanDocument, base: string): string {
@@ -38,4 +44,24 @@ export function withDimension(document: PlanDocument, stepId: string, heard: Hea
       return { ...step, heard: linked, holds };
     }),
   };
+}
+
+/** The plan with one more given dimension, its figure still to come. */
+export function withNewDimension(document: PlanDocument, symbol?: string): PlanDocument {
+  const dimension = dimensionSchema.parse({
+    id: uuid(),
+    name: symbol ?? `Dimension ${document.dimensions.length + 1}`,
+    symbol: symbol ?? freeSymbol(document, 'd'),
+    origin: 'given',
+    expression: '',
+  });
+  return { ...document, dimensions: [...document.dimensions, dimension] };
+}
+
+/** The plan with one dimension changed; a changed symbol is changed in every expression that uses it. */
+export function replacedDimension(document: PlanDocument, next: Dimension): PlanDocument {
+  const before = document.dimensions.find((d) => d.id === next.id);
+  const dimensions = document.dimensions.map((d) => (d.id === next.id ? next : d));
+  if (!before || before.symbol === next.symbol) return { ...document, dimensions };
+  return renameSymbol(document, before.symbol, next.symbol);
 }

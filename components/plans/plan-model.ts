@@ -1,7 +1,12 @@
 import { useMemo } from 'react';
-import { displayMm, type DisplayPreference } from '../../shared/measure';
+import { displayMm, displayValue, type DisplayPreference } from '../../shared/measure';
 import { type PlanDocument } from '../../shared/plan/document';
-import { createModel, type ModelReadings, type PlanModel } from '../../shared/plan/model';
+import {
+  createModel,
+  type DimensionState,
+  type ModelReadings,
+  type PlanModel,
+} from '../../shared/plan/model';
 import { usePreferences } from '../data/preferences';
 import { type FigureParts } from '../ui/figure';
 
@@ -23,6 +28,25 @@ const shownAs = (instrument: string): DisplayPreference['instrument'] =>
       ? 'rule'
       : 'tape';
 
+/**
+ * A dimension's figure as it is spoken of: the grid of its instrument, calipers' digits only where it asks for
+ * them. Null while it cannot be worked out.
+ */
+export function dimensionFigure(
+  state: DimensionState | undefined,
+  preference: DisplayPreference,
+): FigureParts | null {
+  if (!state?.value) return null;
+  const { dimension, kind, value } = state;
+  if (kind !== 'length') return displayValue(value.x, kind, preference);
+  const instrument = shownAs(dimension.instrument);
+  const fine = instrument === 'calipers' || (value.x < 3 && dimension.sense === 'form');
+  return displayMm(value.exact ?? value.x, {
+    ...preference,
+    instrument: fine ? 'calipers' : instrument,
+  });
+}
+
 /** Evaluates the plan, with readings where there are some. */
 export function usePlanValues(document: PlanDocument, readings?: ModelReadings): PlanValues {
   const [{ units, inchGrid }] = usePreferences();
@@ -31,23 +55,8 @@ export function usePlanValues(document: PlanDocument, readings?: ModelReadings):
     const preference: DisplayPreference = { system: units, instrument: 'tape', grid: inchGrid };
     const length = (mm: number | null | undefined) =>
       mm === null || mm === undefined || !Number.isFinite(mm) ? null : displayMm(mm, preference);
-    const figure = (dimensionId: string) => {
-      const state = model.dimensions.get(dimensionId);
-      if (!state?.value) return null;
-      if (state.kind === 'angle')
-        return { decimal: String(Math.round(state.value.x * 100) / 100), unit: '°' };
-      if (state.kind !== 'length')
-        return { decimal: String(Math.round(state.value.x * 1000) / 1000) };
-      const { dimension } = state;
-      // A figure as it is spoken of: the instrument's grid, but calipers only where the tolerance asks for them.
-      const fine =
-        shownAs(dimension.instrument) === 'calipers' ||
-        (state.value.x < 3 && dimension.sense === 'form');
-      return displayMm(state.value.exact ?? state.value.x, {
-        ...preference,
-        instrument: fine ? 'calipers' : shownAs(dimension.instrument),
-      });
-    };
+    const figure = (dimensionId: string) =>
+      dimensionFigure(model.dimensions.get(dimensionId), preference);
     return { model, preference, figure, length };
   }, [model, units, inchGrid]);
 }

@@ -74,13 +74,18 @@ describe('a creator makes a plan of a clip and its captions', () => {
         .waitFor({ state: 'detached' });
 
       await page.getByRole('tab', { name: 'Dimensions' }).click();
-      await page.getByRole('button', { name: 'Add to dimensions' }).click();
-      await page.getByLabel('Value or expression').fill('1.1/2');
+      await page.getByRole('button', { name: 'Add a dimension' }).click();
+      const figure = page.getByRole('combobox', { name: 'Figure of d1' });
+      await figure.fill('1.1/2');
       await page
         .getByText(/Column/)
         .first()
         .waitFor();
-      await page.getByLabel('Value or expression').fill('600 mm');
+      await figure.fill('600 mm');
+      await page
+        .getByText(/Column/)
+        .first()
+        .waitFor({ state: 'detached' });
       await page
         .getByText(/^Kept \d/)
         .last()

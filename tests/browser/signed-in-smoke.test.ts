@@ -41,6 +41,7 @@ describe.each(looks)('signed in, $width px, by $theme', (look) => {
     for (const tab of [
       'Clip and steps',
       'Dimensions',
+      'Checks',
       'Parts and stock',
       'Tools and links',
       'About',
@@ -48,7 +49,7 @@ describe.each(looks)('signed in, $width px, by $theme', (look) => {
     ]) {
       await page.getByRole('tab', { name: tab }).click();
       if (tab === 'Clip and steps') await page.getByRole('button', { name: 'Open step 4' }).click();
-      if (tab === 'Dimensions') await page.getByRole('button', { name: /^Open runway/ }).click();
+      if (tab === 'Dimensions') await page.getByRole('button', { name: /^Work on runway/ }).click();
       expect([tab, await axe(page)]).toEqual([tab, []]);
       expect([tab, await sidewaysScroll(page)]).toEqual([tab, 0]);
     }

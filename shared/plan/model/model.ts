@@ -110,13 +110,26 @@ function work(compiled: CompiledModel, given: ModelReadings | null, old: Worked 
   return { compiled, readings: given, results, dimensions, checks, parts };
 }
 
+type Users = ReadonlyMap<string, readonly string[]>;
+
+/** Who needs each dimension, in the order of the plan. */
+function usersBy(all: ReadonlyMap<string, { inputs: readonly string[] }>): Users {
+  const users = new Map<string, string[]>();
+  for (const [user, { inputs }] of all)
+    for (const id of new Set(inputs)) {
+      const list = users.get(id);
+      if (list) list.push(user);
+      else users.set(id, [user]);
+    }
+  return users;
+}
+
 function present(worked: Worked): PlanModel {
   const { compiled, readings, results, dimensions, checks, parts } = worked;
   const { document, symbols, entries, scope, dependents } = compiled;
   const texts = new Map<string, SizeState>();
   const graph: Graph = { symbols, entries, results };
-  const using = (all: ReadonlyMap<string, { inputs: readonly string[] }>, id: string) =>
-    [...all].flatMap(([user, { inputs }]) => (inputs.includes(id) ? [user] : []));
+  let users: { checks: Users; parts: Users } | null = null;
   return {
     document,
     readings,
@@ -131,11 +144,14 @@ function present(worked: Worked): PlanModel {
       return known;
     },
     feeds: (id) => entries.get(id)?.inputs ?? [],
-    usedBy: (id) => ({
-      dimensions: [...(dependents.get(id) ?? [])],
-      checks: using(compiled.checks, id),
-      parts: using(compiled.parts, id),
-    }),
+    usedBy: (id) => {
+      users ??= { checks: usersBy(compiled.checks), parts: usersBy(compiled.parts) };
+      return {
+        dimensions: [...(dependents.get(id) ?? [])],
+        checks: [...(users.checks.get(id) ?? [])],
+        parts: [...(users.parts.get(id) ?? [])],
+      };
+    },
     update: (next, given = readings) => present(work(compileModel(next, compiled), given, worked)),
   };
 }

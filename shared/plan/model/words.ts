@@ -104,8 +104,12 @@ export function describeCheck(
   if (verdict === 'needs-a-reading' || margin === null || worstMargin === null)
     return `Needs a reading. ${advice}`.trim();
   const room = amountText(margin, kind, pref);
-  if (verdict === 'holds')
-    return `Holds with ${amountText(worstMargin, kind, pref)} to spare at the worst.`;
+  if (verdict === 'holds') {
+    const spare = amountText(worstMargin, kind, pref);
+    return /[1-9]/.test(spare)
+      ? `Holds with ${spare} to spare at the worst.`
+      : 'Holds, with nothing to spare at the worst.';
+  }
   if (verdict === 'fails') return `Fails by ${room}. ${advice}`.trim();
   if (verdict === 'too-close')
     return `Too close to call: ${room} ${margin < 0 ? 'short' : 'to spare'}, less than the instrument can tell. Use a finer one, or make a trial.`;
