@@ -20,7 +20,6 @@ import { ClipPane } from './clip-pane';
 import { useClipPlace } from './clip-place';
 import { useDraft } from './drafting-queries';
 import {
-  checkFields,
   consumableFields,
   creditFields,
   hardwareFields,
@@ -30,6 +29,7 @@ import {
   toolFields,
 } from './list-fields';
 import { DimensionsTab } from './dimensions/dimensions-tab';
+import { ChecksTab } from './checks-tab';
 import { ListEditor } from './list-editor';
 import { PublishPane } from './publish-pane';
 import { SheetPane } from './sheet-pane';
@@ -110,18 +110,19 @@ export function keptWords(kept: Kept): string {
 
 function Editing({ draft }: { draft: Draft }) {
   const editor = useDraftEditor(draft);
-  const { document, change, kept, model } = editor;
+  const { document, change, kept } = editor;
   const [tab, setTab] = useState<Tab>('steps');
   const [step, setStep] = useState<string | null>(null);
   const [dimension, setDimension] = useState<string | null>(null);
+  const [check, setCheck] = useState<string | null>(null);
   const toPlace = ({ place: { in: list, elementId } }: SheetRow) => {
     if (list === 'steps') setStep(elementId);
     if (list === 'dimensions') setDimension(elementId);
+    if (list === 'checks') setCheck(elementId);
     setTab(list === 'steps' ? 'steps' : (tabOf[list] ?? 'about'));
   };
   const list = <
-    K extends
-      'checks' | 'consumables' | 'credits' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links',
+    K extends 'consumables' | 'credits' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links',
   >(
     key: K,
   ) => ({
@@ -154,7 +155,7 @@ function Editing({ draft }: { draft: Draft }) {
             />
           ) : null}
           {tab === 'checks' ? (
-            <ListEditor title="Checks" fields={checkFields(model)} {...list('checks')} />
+            <ChecksTab key={check} editor={editor} start={check} onPlace={toPlace} />
           ) : null}
           {tab === 'parts' ? (
             <>

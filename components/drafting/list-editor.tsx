@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { View } from 'react-native';
 import { v7 as uuid } from 'uuid';
 import { Button } from '../ui/button';
@@ -38,6 +38,10 @@ export interface ListEditorProps<T extends { id: string }> {
   fields: ListFields<T>;
   items: readonly T[];
   onChange: (items: T[]) => void;
+  /** The element that is open at first, when something leads to it. */
+  start?: string | null;
+  /** What stands under a line, closed or open. */
+  below?: (item: T) => ReactNode;
 }
 
 /** A list of a plan: lines that open into their fields. */
@@ -46,8 +50,10 @@ export function ListEditor<T extends { id: string }>({
   fields,
   items,
   onChange,
+  start = null,
+  below,
 }: ListEditorProps<T>) {
-  const [open, setOpen] = useState<string | null>(null);
+  const [open, setOpen] = useState<string | null>(start);
   const replace = (next: T) => onChange(items.map((item) => (item.id === next.id ? next : item)));
   const add = () => {
     const item = fields.make(uuid(), items.length);
@@ -78,6 +84,7 @@ export function ListEditor<T extends { id: string }>({
                   {open === item.id ? 'Close' : 'Open'}
                 </Button>
               </Row>
+              {below?.(item)}
               {open === item.id ? (
                 <Stack gap={12}>
                   {fields.fields.map((field) => (

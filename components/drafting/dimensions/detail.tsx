@@ -1,14 +1,14 @@
 import { StyleSheet, View } from 'react-native';
 import { type Dimension } from '../../../shared/plan/document';
-import { describeCheck, type DimensionState } from '../../../shared/plan/model';
+import { type DimensionState } from '../../../shared/plan/model';
 import { Button } from '../../ui/button';
 import { Figure } from '../../ui/figure';
 import { Heading } from '../../ui/heading';
 import { Row, Stack } from '../../ui/layout';
 import { Text } from '../../ui/text';
 import { colour, line } from '../../ui/tokens';
-import { VerdictShape, verdictKind, verdictLook } from '../../ui/verdict';
 import { webStyle } from '../../ui/web-style';
+import { CheckSaid } from '../check-said';
 import { type DraftEditor } from '../use-draft-editor';
 import { BandDrawing } from './band-drawing';
 import { DimensionFields } from './dimension-fields';
@@ -163,26 +163,20 @@ function Lineage({ title, none, list, onChoose }: LineageProps) {
 }
 
 function ChecksOver({ dimension, editor }: DetailProps) {
-  const { model, document } = editor;
+  const { model } = editor;
   const states = model.usedBy(dimension.id).checks.flatMap((id) => model.checks.get(id) ?? []);
   if (states.length === 0) return null;
-  const preference = draftPreference(document.units);
   return (
     <Stack gap={8}>
       <Heading level={3}>Checks</Heading>
-      {states.map((state) => {
-        const kind = verdictKind(state.verdict);
-        return (
-          <Row key={state.id} gap={12} align="flex-start">
-            <View style={styles.shape}>
-              <VerdictShape kind={kind} label={verdictLook[kind].word} />
-            </View>
-            <Text size="note" style={{ flexShrink: 1 }}>
-              {state.check.name}. {describeCheck(model, state, preference)}
-            </Text>
-          </Row>
-        );
-      })}
+      {states.map((state) => (
+        <Stack key={state.id} gap={4}>
+          <Text size="note" weight={600}>
+            {state.check.name}
+          </Text>
+          <CheckSaid state={state} editor={editor} />
+        </Stack>
+      ))}
     </Stack>
   );
 }
@@ -204,5 +198,4 @@ const styles = StyleSheet.create({
   }),
   bar: { height: 6, backgroundColor: colour.ruleThin },
   share: { height: 6, backgroundColor: colour.ink },
-  shape: { paddingTop: 4 },
 });
