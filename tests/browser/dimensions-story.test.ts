@@ -3,7 +3,7 @@ import { axe, sidewaysScroll, story, type Stage } from './harness';
 const odalys = { email: 'odalys@marrow-lane.example', password: 'cut once measure twice' };
 
 /** A copy of a demo plan of one's own, so that no other story sees what is changed; leads to its dimensions. */
-async function ownCopy(stage: Stage, width: number) {
+async function ownCopy(stage: Stage, width: 360 | 1280) {
   const opened = await stage.newPage({ width, as: odalys });
   const { page, context } = opened;
   const drafts = (await (await context.request.get(`${stage.base}/api/drafts`)).json()) as {
@@ -41,7 +41,10 @@ describe('a creator works on dimensions', () => {
     const mend = page.getByRole('button', { name: /^Make base_w/ }).first();
     await mend.click();
     await row.waitFor({ state: 'detached' });
-    await page.getByText(/^Kept \d/).last().waitFor();
+    await page
+      .getByText(/^Kept \d/)
+      .last()
+      .waitFor();
   });
 
   story('completes names, sees what is wrong where it is wrong, by keys alone', async (stage) => {
