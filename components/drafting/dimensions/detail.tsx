@@ -12,16 +12,8 @@ import { CheckSaid } from '../check-said';
 import { type DraftEditor } from '../use-draft-editor';
 import { BandDrawing } from './band-drawing';
 import { DimensionFields } from './dimension-fields';
+import { type DetailProps } from './detail-props';
 import { draftPreference, spreadFigure, usersOf, usersWords } from './facts';
-
-export interface DetailProps {
-  dimension: Dimension;
-  editor: DraftEditor;
-  onChange: (dimension: Dimension) => void;
-  onRemove: () => void;
-  /** Leads to another dimension. */
-  onChoose: (id: string) => void;
-}
 
 /** One dimension whole: what moves it, what feeds it and what it feeds, its checks, its other fields. */
 export function Detail(props: DetailProps) {

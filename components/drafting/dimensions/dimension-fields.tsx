@@ -8,7 +8,7 @@ import { Select } from '../../ui/select';
 import { TextField } from '../../ui/text-field';
 import { OneField } from '../list-editor';
 import { dimensionFields } from '../list-fields';
-import { type DetailProps } from './detail';
+import { type DetailProps } from './detail-props';
 
 /** Name, symbol and all the fields that do not stand in the row. */
 export function DimensionFields({ dimension: d, editor, onChange, onRemove }: DetailProps) {
