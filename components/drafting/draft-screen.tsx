@@ -239,7 +239,12 @@ function StepsTab({ editor, open, setOpen, onPlace }: StepsTabProps) {
           width: 300,
           content: (
             <View style={{ padding: 4, paddingHorizontal: 12 }}>
-              <SheetPane document={editor.document} model={editor.model} onPlace={onPlace} />
+              <SheetPane
+                document={editor.document}
+                model={editor.model}
+                onPlace={onPlace}
+                onChange={editor.change}
+              />
             </View>
           ),
         },

@@ -1,7 +1,9 @@
-import { checkSheet, type SheetRow } from '../../shared/plan/sheet';
+import { v7 as uuid } from 'uuid';
+import { applyMend, checkSheet, mendLabel, type SheetRow } from '../../shared/plan/sheet';
 import { type PlanModel } from '../../shared/plan/model';
 import { type PlanDocument } from '../../shared/plan/document';
 import { useMemo } from 'react';
+import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
 import { Row, Rule, Stack } from '../ui/layout';
 import { PressArea } from '../ui/pressable';
@@ -13,10 +15,12 @@ export interface SheetPaneProps {
   model: PlanModel;
   /** Leads to the place a row speaks of. */
   onPlace: (row: SheetRow) => void;
+  /** Changes the plan, for rows that can be mended in one tap. */
+  onChange?: (change: (document: PlanDocument) => PlanDocument) => void;
 }
 
 /** The check sheet, live beside the work; each row leads to its place. */
-export function SheetPane({ document, model, onPlace }: SheetPaneProps) {
+export function SheetPane({ document, model, onPlace, onChange }: SheetPaneProps) {
   const sheet = useMemo(() => checkSheet(document, model), [document, model]);
   return (
     <Stack gap={12}>
@@ -39,6 +43,18 @@ export function SheetPane({ document, model, onPlace }: SheetPaneProps) {
               </Stack>
             </Row>
           </PressArea>
+          {row.mends && onChange ? (
+            <Row gap={8} wrap>
+              {row.mends.map((mend) => (
+                <Button
+                  key={mendLabel(mend, document)}
+                  size="small"
+                  label={mendLabel(mend, document)}
+                  onPress={() => onChange((d) => applyMend(d, mend, uuid()))}
+                />
+              ))}
+            </Row>
+          ) : null}
           <Rule />
         </Stack>
       ))}

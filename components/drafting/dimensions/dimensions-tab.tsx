@@ -117,7 +117,9 @@ export function DimensionsTab({ editor, chosen, onChoose, onPlace }: DimensionsT
 /** The check sheet follows a moment behind the typing. */
 function LaterSheet({ editor, onPlace }: Pick<DimensionsTabProps, 'editor' | 'onPlace'>) {
   const model = useDeferredValue(editor.model);
-  return <SheetPane document={model.document} model={model} onPlace={onPlace} />;
+  return (
+    <SheetPane document={model.document} model={model} onPlace={onPlace} onChange={editor.change} />
+  );
 }
 
 function fits(d: Dimension, wanted: string, origin: 'all' | Origin): boolean {

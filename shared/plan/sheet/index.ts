@@ -95,3 +95,4 @@ export async function askLayout(
 
 export { type Finding, type Rule, type RuleLevel, type Place } from './rule';
 export { type AskLayout, type LayoutAnswer } from './layout-port';
+export { applyMend, mendLabel, type Mend } from './mends';

@@ -1,5 +1,6 @@
 import { type PlanDocument } from '../document';
 import { type PlanModel } from '../model';
+import { type Mend } from './mends';
 
 export type RuleLevel = 'must' | 'should' | 'note';
 
@@ -27,8 +28,8 @@ export interface Finding {
   message: string;
   /** How to mend it, one sentence. */
   cure: string;
-  /** A figure typed in prose, as it stands there, and the dimension of the same value. */
-  figure?: { text: string; dimensionId: string | null };
+  /** Ways to mend it in one tap, the likeliest first. */
+  mends?: Mend[];
 }
 
 /** One rule of the check sheet. It must be quiet unless it is right. */

@@ -26,7 +26,12 @@ export const dimsLooseFigure: Rule = {
           cure: same
             ? `Make it a reference to ${same.symbol}.`
             : 'Make a dimension of it, refer to one, or say that it is a name.',
-          figure: { text, dimensionId: same?.id ?? null },
+          mends: [
+            same
+              ? { do: 'reference', stepId: step.id, text, dimensionId: same.id }
+              : { do: 'dimension', stepId: step.id, text },
+            { do: 'name', text },
+          ],
         };
       }),
     ),

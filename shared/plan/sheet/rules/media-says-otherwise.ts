@@ -47,6 +47,12 @@ export const mediaSaysOtherwise: Rule = {
             place: { in: 'steps', elementId: step.id },
             message: `In step ${i + 1} the clip says ${heard.value.text}; ${name} is ${expression}.`,
             cure: 'Correct the dimension, mute the words, or mark the figure as right on your machine only.',
+            mends: (['muted', 'right-on-mine'] as const).map((ruling) => ({
+              do: 'ruling',
+              stepId: step.id,
+              heardId: heard.id,
+              ruling,
+            })),
           },
         ];
       }),
