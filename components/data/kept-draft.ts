@@ -9,9 +9,34 @@ export interface KeptDraft {
 
 const key = (planId: string) => `scantling-draft-2-${planId}`;
 
-/** Keeps a draft's unsaved state in the browser, so that a closed tab loses nothing. */
-export const keepLocal = (planId: string, kept: KeptDraft): Promise<void> =>
-  set(key(planId), kept).catch(() => undefined);
+const pause = 150;
+const waiting = new Map<string, KeptDraft>();
+let timer: ReturnType<typeof setTimeout> | undefined;
+
+function writeWaiting(): void {
+  clearTimeout(timer);
+  timer = undefined;
+  for (const [planId, kept] of waiting) void set(key(planId), kept).catch(() => undefined);
+  waiting.clear();
+}
+
+// The last moment a page is sure to get, closed, reloaded or put away.
+if (typeof document !== 'undefined')
+  document.addEventListener('visibilitychange', () => {
+    if (document.visibilityState === 'hidden') writeWaiting();
+  });
+
+/**
+ * Keeps a draft's unsaved state in the browser, so that a closed tab loses nothing: a moment after the last of
+ * quick changes, since a large plan takes milliseconds to write, and at once when the page goes.
+ */
+export function keepLocal(planId: string, kept: KeptDraft): void {
+  waiting.set(planId, kept);
+  timer ??= setTimeout(writeWaiting, pause);
+}
 export const readLocal = (planId: string): Promise<KeptDraft | undefined> =>
   get<KeptDraft>(key(planId)).catch(() => undefined);
-export const dropLocal = (planId: string): Promise<void> => del(key(planId)).catch(() => undefined);
+export function dropLocal(planId: string): Promise<void> {
+  waiting.delete(planId);
+  return del(key(planId)).catch(() => undefined);
+}

@@ -48,7 +48,7 @@ export function ChecksTab({ editor, start, onPlace }: ChecksTabProps) {
           width: 340,
           content: (
             <View style={{ padding: 4, paddingHorizontal: 12 }}>
-              <SheetPane document={document} model={model} onPlace={onPlace} onChange={change} />
+              <SheetPane model={model} onPlace={onPlace} onChange={change} />
             </View>
           ),
         },

@@ -1,5 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
-import { useState } from 'react';
+import { useCallback, useState } from 'react';
 import { View } from 'react-native';
 import { type Draft } from '../../shared/api/plans';
 import { type SheetRow } from '../../shared/plan/sheet';
@@ -115,12 +115,12 @@ function Editing({ draft }: { draft: Draft }) {
   const [step, setStep] = useState<string | null>(null);
   const [dimension, setDimension] = useState<string | null>(null);
   const [check, setCheck] = useState<string | null>(null);
-  const toPlace = ({ place: { in: list, elementId } }: SheetRow) => {
+  const toPlace = useCallback(({ place: { in: list, elementId } }: SheetRow) => {
     if (list === 'steps') setStep(elementId);
     if (list === 'dimensions') setDimension(elementId);
     if (list === 'checks') setCheck(elementId);
     setTab(list === 'steps' ? 'steps' : (tabOf[list] ?? 'about'));
-  };
+  }, []);
   const list = <
     K extends 'consumables' | 'credits' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links',
   >(
@@ -239,12 +239,7 @@ function StepsTab({ editor, open, setOpen, onPlace }: StepsTabProps) {
           width: 300,
           content: (
             <View style={{ padding: 4, paddingHorizontal: 12 }}>
-              <SheetPane
-                document={editor.document}
-                model={editor.model}
-                onPlace={onPlace}
-                onChange={editor.change}
-              />
+              <SheetPane model={editor.model} onPlace={onPlace} onChange={editor.change} />
             </View>
           ),
         },

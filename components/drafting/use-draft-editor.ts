@@ -39,7 +39,7 @@ export function useDraftEditor(draft: Draft) {
     () =>
       new DraftSaver(draft.version, draft.document, {
         put: (version, document) => putDraft(draft.id, version, document),
-        keep: (kept) => void keepLocal(draft.id, kept),
+        keep: (kept) => keepLocal(draft.id, kept),
         drop: () => void dropLocal(draft.id),
         changed: (document, kept) => setShown((before) => shownNext(before, document, kept)),
       }),
@@ -56,15 +56,15 @@ export function useDraftEditor(draft: Draft) {
       saver.stop();
     };
   }, [draft.id, saver]);
-  return useMemo(
+  const acts = useMemo(
     () => ({
-      ...shown,
       change: (fn: (document: PlanDocument) => PlanDocument) => saver.change(fn),
       choose: (which: 'mine' | 'other') => saver.choose(which),
       saveNow: () => saver.saveNow(),
       version: () => saver.version,
     }),
-    [shown, saver],
+    [saver],
   );
+  return useMemo(() => ({ ...shown, ...acts }), [shown, acts]);
 }
 export type DraftEditor = ReturnType<typeof useDraftEditor>;

@@ -1,3 +1,4 @@
+import { memo, useDeferredValue } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { type Dimension } from '../../../shared/plan/document';
 import { type DimensionState } from '../../../shared/plan/model';
@@ -17,13 +18,30 @@ import { draftPreference, spreadFigure, usersOf, usersWords } from './facts';
 
 /** One dimension whole: what moves it, what feeds it and what it feeds, its checks, its other fields. */
 export function Detail(props: DetailProps) {
-  const { dimension: d, editor, onChoose } = props;
+  const { dimension, editor, onChoose } = props;
+  const behind = useDeferredValue(editor);
+  return (
+    <Stack gap={16}>
+      <Told
+        dimension={behind.model.dimensions.get(dimension.id)?.dimension ?? dimension}
+        editor={behind}
+        onChoose={onChoose}
+      />
+      <DimensionFields {...props} />
+    </Stack>
+  );
+}
+
+type ToldProps = Pick<DetailProps, 'dimension' | 'editor' | 'onChoose'>;
+
+/** What the model says of it, a moment behind the typing. */
+const Told = memo(function Told({ dimension: d, editor, onChoose }: ToldProps) {
   const { model } = editor;
   const state = model.dimensions.get(d.id);
   const users = usersOf(model, d.id);
   const feeds = model.feeds(d.id).flatMap((id) => model.dimensions.get(id)?.dimension ?? []);
   return (
-    <Stack gap={16}>
+    <>
       <Stack gap={4}>
         <Row justify="space-between" align="baseline" gap={12}>
           <Heading level={2} ruled={false}>
@@ -50,11 +68,10 @@ export function Detail(props: DetailProps) {
         list={users.dimensions}
         onChoose={onChoose}
       />
-      <ChecksOver {...props} />
-      <DimensionFields {...props} />
-    </Stack>
+      <ChecksOver dimension={d} editor={editor} />
+    </>
   );
-}
+});
 
 /** Worst case and root-sum-square, and each source's share of it. */
 function Spread({
@@ -154,7 +171,7 @@ function Lineage({ title, none, list, onChoose }: LineageProps) {
   );
 }
 
-function ChecksOver({ dimension, editor }: DetailProps) {
+function ChecksOver({ dimension, editor }: Pick<ToldProps, 'dimension' | 'editor'>) {
   const { model } = editor;
   const states = model.usedBy(dimension.id).checks.flatMap((id) => model.checks.get(id) ?? []);
   if (states.length === 0) return null;

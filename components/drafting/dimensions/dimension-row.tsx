@@ -178,9 +178,6 @@ const styles = StyleSheet.create({
     borderBottomStyle: 'solid',
     borderBottomColor: colour.ruleThin,
     cursor: 'pointer',
-    // Rows out of sight cost nothing.
-    contentVisibility: 'auto',
-    containIntrinsicSize: 'auto 61px',
   }),
   fails: webStyle({ boxShadow: `inset 2.5px 0 0 ${colour.fails}` }),
   expression: webStyle({ overflowWrap: 'anywhere' }),

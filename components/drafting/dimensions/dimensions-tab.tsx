@@ -1,4 +1,4 @@
-import { useCallback, useDeferredValue, useMemo, useState } from 'react';
+import { useCallback, useMemo, useState } from 'react';
 import { View } from 'react-native';
 import { type Dimension, type Origin } from '../../../shared/plan/document';
 import { type SheetRow } from '../../../shared/plan/sheet';
@@ -105,20 +105,12 @@ export function DimensionsTab({ editor, chosen, onChoose, onPlace }: DimensionsT
           content: (
             <View style={{ padding: 4, paddingHorizontal: 12, gap: 24 }}>
               {wide ? detail : null}
-              <LaterSheet editor={editor} onPlace={onPlace} />
+              <SheetPane model={editor.model} onPlace={onPlace} onChange={change} />
             </View>
           ),
         },
       ]}
     />
-  );
-}
-
-/** The check sheet follows a moment behind the typing. */
-function LaterSheet({ editor, onPlace }: Pick<DimensionsTabProps, 'editor' | 'onPlace'>) {
-  const model = useDeferredValue(editor.model);
-  return (
-    <SheetPane document={model.document} model={model} onPlace={onPlace} onChange={editor.change} />
   );
 }
 

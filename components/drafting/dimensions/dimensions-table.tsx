@@ -1,4 +1,4 @@
-import { useCallback, useDeferredValue, useState, type ReactNode } from 'react';
+import { memo, useCallback, useDeferredValue, useMemo, useState, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { type Dimension } from '../../../shared/plan/document';
 import { Text } from '../../ui/text';
@@ -20,9 +20,10 @@ export interface DimensionsTableProps {
   below: ReactNode;
 }
 
-const firstRows = 60;
+/** Rows of a chunk; the chunks without the open row are not drawn again while it is typed in. */
+const chunkRows = 40;
 
-/** Rows; the chosen one is worked on in place, arrows lead to its neighbours. */
+/** Rows; the chosen one is worked on in place, arrows lead to its neighbours. The others follow a moment behind. */
 export function DimensionsTable(props: DimensionsTableProps) {
   const { editor, shown, chosen, onChoose, wide } = props;
   const [byHand, setByHand] = useState(false);
@@ -37,34 +38,63 @@ export function DimensionsTable(props: DimensionsTableProps) {
     const next = shown[shown.findIndex((d) => d.id === chosen) + by];
     if (next) choose(next.id);
   };
+  const behind = useDeferredValue(editor);
+  const rows = useDeferredValue(shown);
+  const chunks = useMemo(() => inChunks(rows), [rows]);
   // A long table comes in two goes, so that the page answers at once.
-  const most = useDeferredValue(shown.length, firstRows);
+  const most = useDeferredValue(chunks.length, 2);
+  const dimension = shown.find((d) => d.id === chosen);
+  const home = chunks.findIndex((chunk) => chunk.some((d) => d.id === chosen));
+  const open = dimension ? (
+    <OpenRow
+      key={dimension.id}
+      dimension={dimension}
+      editor={editor}
+      onChange={props.onChange}
+      onMove={move}
+      onClose={() => onChoose(null)}
+      autoFocus={byHand}
+      below={props.below}
+    />
+  ) : null;
   return (
     <View role="table" aria-label="Dimensions" aria-rowcount={shown.length}>
       {wide ? <Head units={editor.document.units} /> : null}
-      <View role="rowgroup">
-        {shown
-          .slice(0, Math.max(most, firstRows))
-          .map((d) =>
-            d.id === chosen ? (
-              <OpenRow
-                key={d.id}
-                dimension={d}
-                editor={editor}
-                onChange={props.onChange}
-                onMove={move}
-                onClose={() => onChoose(null)}
-                autoFocus={byHand}
-                below={props.below}
-              />
-            ) : (
-              <ClosedRow key={d.id} dimension={d} editor={editor} wide={wide} onChoose={choose} />
-            ),
-          )}
-      </View>
+      {chunks.slice(0, Math.max(most, 2, home + 1)).map((chunk, i) => (
+        <Chunk
+          key={i}
+          rows={chunk}
+          editor={behind}
+          wide={wide}
+          onChoose={choose}
+          openId={i === home ? chosen : null}
+          open={i === home ? open : null}
+        />
+      ))}
+      {home < 0 ? <View role="rowgroup">{open}</View> : null}
     </View>
   );
 }
+
+function inChunks(rows: readonly Dimension[]): Dimension[][] {
+  const chunks = [];
+  for (let i = 0; i < rows.length; i += chunkRows) chunks.push(rows.slice(i, i + chunkRows));
+  return chunks;
+}
+
+interface ChunkProps extends Pick<ClosedRowProps, 'editor' | 'wide' | 'onChoose'> {
+  rows: readonly Dimension[];
+  openId: string | null;
+  open: ReactNode;
+}
+
+const Chunk = memo(function Chunk({ rows, openId, open, ...rest }: ChunkProps) {
+  return (
+    <View role="rowgroup" style={open ? null : styles.chunk}>
+      {rows.map((d) => (d.id === openId ? open : <ClosedRow key={d.id} dimension={d} {...rest} />))}
+    </View>
+  );
+});
 
 const preferences = { mm: draftPreference('mm'), in: draftPreference('in') };
 
@@ -76,7 +106,8 @@ interface ClosedRowProps {
 }
 
 /** Works out what a row says; the row itself is drawn again only when that changed. */
-function ClosedRow({ dimension, editor, wide, onChoose }: ClosedRowProps) {
+const ClosedRow = memo(function ClosedRow(props: ClosedRowProps) {
+  const { dimension, editor, wide, onChoose } = props;
   const { model, good, document } = editor;
   return (
     <DimensionRow
@@ -90,7 +121,7 @@ function ClosedRow({ dimension, editor, wide, onChoose }: ClosedRowProps) {
       onChoose={onChoose}
     />
   );
-}
+});
 
 function Head({ units }: { units: 'mm' | 'in' }) {
   const heads = [
@@ -118,6 +149,11 @@ function Head({ units }: { units: 'mm' | 'in' }) {
 }
 
 const styles = StyleSheet.create({
+  // Chunks out of sight cost nothing; the open row's list of names may hang out of its chunk.
+  chunk: webStyle({
+    contentVisibility: 'auto',
+    containIntrinsicSize: `auto ${chunkRows * 61}px`,
+  }),
   head: webStyle({
     paddingLeft: 10,
     paddingRight: 4,
