@@ -1,8 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { Controller, useForm } from 'react-hook-form';
 import { type z } from 'zod';
 import { signInBody } from '../../shared/api/accounts';
+import { lastPerson } from '../data/last-person';
 import { showProblem } from '../data/form-problem';
 import { Button } from '../ui/button';
 import { Form } from '../ui/form';
@@ -24,6 +25,12 @@ export function SignInForm({ submit, onTrouble }: SignInFormProps) {
     defaultValues: { email: '', password: '' },
   });
   const [busy, setBusy] = useState(false);
+  const { setValue, getValues } = form;
+  useEffect(() => {
+    // Only then: the page was pre-rendered without it.
+    const last = lastPerson();
+    if (last && getValues('email') === '') setValue('email', last.email);
+  }, [setValue, getValues]);
   const send = form.handleSubmit(async (values) => {
     onTrouble(null);
     setBusy(true);

@@ -1,5 +1,5 @@
 import { usePathname } from 'expo-router';
-import { type ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { type Me } from '../../shared/api/accounts';
 import { useMe } from '../data/me-queries';
 import { PageHead } from '../shell/page-head';
@@ -8,7 +8,9 @@ import { Page, Row } from '../ui/layout';
 import { EmptyState, ErrorState, LoadingLines } from '../ui/states';
 import { useRouter, type Href } from 'expo-router';
 import { useQueryClient } from '@tanstack/react-query';
+import { lastPerson } from '../data/last-person';
 import { keys } from '../data/query-client';
+import { SessionEnded, useWaitingWords } from './session-ended';
 
 export interface SignedInProps {
   /** Title of the page while nobody is known. */
@@ -21,30 +23,25 @@ export interface SignedInProps {
 /** Shows its content to a person; offers signing in to nobody; never sends anybody away for lack of signal. */
 export function SignedIn({ title, what, children }: SignedInProps) {
   const { me, known, failed } = useMe();
-  const router = useRouter();
-  const path = usePathname();
   const client = useQueryClient();
+  const [before, setBefore] = useState<Me | null>(null);
+  if (me && me !== before) setBefore(me);
   if (me) return children(me);
+  // Nobody loses the page they are working on because the server has forgotten them meanwhile.
+  if (before && lastPerson()?.id === before.id) {
+    return (
+      <>
+        {children(before)}
+        {known ? <SessionEnded person={before} /> : null}
+      </>
+    );
+  }
   return (
     <>
       <PageHead title={title} />
       <Page>
         {known ? (
-          <EmptyState
-            title="Sign in first"
-            actions={
-              <Row gap={12} wrap>
-                <Button
-                  kind="primary"
-                  label="Sign in"
-                  onPress={() => router.push(`/sign-in?next=${encodeURIComponent(path)}` as Href)}
-                />
-                <Button label="Make an account" onPress={() => router.push('/sign-up')} />
-              </Row>
-            }
-          >
-            {what}
-          </EmptyState>
+          <SignInFirst what={what} />
         ) : failed ? (
           <ErrorState
             title="No signal"
@@ -58,5 +55,28 @@ export function SignedIn({ title, what, children }: SignedInProps) {
         )}
       </Page>
     </>
+  );
+}
+
+function SignInFirst({ what }: { what: string }) {
+  const router = useRouter();
+  const path = usePathname();
+  const waiting = useWaitingWords(lastPerson()?.id);
+  return (
+    <EmptyState
+      title={waiting ? 'Your session has ended' : 'Sign in first'}
+      actions={
+        <Row gap={12} wrap>
+          <Button
+            kind="primary"
+            label="Sign in"
+            onPress={() => router.push(`/sign-in?next=${encodeURIComponent(path)}` as Href)}
+          />
+          <Button label="Make an account" onPress={() => router.push('/sign-up')} />
+        </Row>
+      }
+    >
+      {waiting || what}
+    </EmptyState>
   );
 }

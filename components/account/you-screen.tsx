@@ -1,10 +1,8 @@
 import { useState } from 'react';
 import { useRouter } from 'expo-router';
 import { type Me } from '../../shared/api/accounts';
-import { useMe, useResendConfirmation, useSignOut, useUpdateProfile } from '../data/me-queries';
+import { useMe, useResendConfirmation, useUpdateProfile } from '../data/me-queries';
 import { usePreferences } from '../data/preferences';
-import { useOutbox } from '../data/outbox-hooks';
-import { clearOutbox } from '../data/outbox';
 import { showProblem } from '../data/form-problem';
 import { tell } from '../data/problems';
 import { PageHead } from '../shell/page-head';
@@ -12,7 +10,6 @@ import { ThemeSetting } from '../shell/theme-choice';
 import { toast } from '../ui/announcer';
 import { Banner } from '../ui/banner';
 import { Button } from '../ui/button';
-import { Dialog } from '../ui/dialog';
 import { Form } from '../ui/form';
 import { Heading } from '../ui/heading';
 import { Page, Row, Section, Stack } from '../ui/layout';
@@ -23,6 +20,7 @@ import { Text } from '../ui/text';
 import { TextField } from '../ui/text-field';
 import { useForm, Controller } from 'react-hook-form';
 import { CreatorSection } from './creator-section';
+import { Leave } from './leave';
 
 /** One's own page; signed out it still holds the settings of this browser. */
 export function YouScreen() {
@@ -174,42 +172,6 @@ function Settings({ signedIn }: { signedIn: boolean }) {
         onChange={(terms) => change({ terms })}
       />
       <ThemeSetting />
-    </Section>
-  );
-}
-
-function Leave({ me }: { me: Me }) {
-  const signOut = useSignOut();
-  const router = useRouter();
-  const unsent = useOutbox().filter((job) => job.personId === me.id).length;
-  const [asking, setAsking] = useState(false);
-  const leave = () =>
-    signOut.mutate(undefined, {
-      onSuccess: () => {
-        void clearOutbox(me.id);
-        router.replace('/');
-      },
-      onError: (error) => toast({ text: tell(error).text }),
-    });
-  return (
-    <Section>
-      <Button
-        label="Sign out"
-        onPress={() => (unsent ? setAsking(true) : leave())}
-        busy={signOut.isPending}
-      />
-      <Dialog
-        open={asking}
-        title="Some of your bench entries are not sent"
-        onClose={() => setAsking(false)}
-        keep="Stay signed in"
-        action={{ label: `Discard ${unsent} and sign out`, onPress: leave, danger: true }}
-      >
-        <Text>
-          {unsent} {unsent === 1 ? 'entry waits' : 'entries wait'} on this device. Stay until the
-          signal is back and they go by themselves.
-        </Text>
-      </Dialog>
     </Section>
   );
 }

@@ -19,6 +19,7 @@ import {
   type Role,
 } from '../../shared/api/accounts';
 import { call, type CallInput } from './api-client';
+import { lastPerson, noteLastPerson } from './last-person';
 import { adoptPreferences } from './preferences';
 import { keys, staleTimes } from './query-client';
 import { useMounted } from '../ui/use-media';
@@ -37,7 +38,9 @@ export function useMe(): { me: Me | null; known: boolean; failed: boolean } {
   const mounted = useMounted();
   const me = mounted ? (query.data ?? null) : null;
   useEffect(() => {
-    if (me) adoptPreferences(me.preferences);
+    if (!me) return;
+    adoptPreferences(me.preferences);
+    noteLastPerson(me);
   }, [me]);
   return { me, known: mounted && query.data !== undefined, failed: mounted && query.isError };
 }
@@ -52,6 +55,10 @@ export function useSignIn() {
   return useMutation({
     mutationFn: (body: CallInput<typeof signIn>['body']) => call(signIn, { body }),
     onSuccess: ({ me }) => {
+      // What was kept of somebody else's is not for this person.
+      const before = lastPerson();
+      if (before && before.id !== me.id)
+        client.removeQueries({ predicate: (q) => q.queryKey[0] !== 'me' });
       client.setQueryData(keys.me, me);
       // Lists asked for as somebody else, or as nobody, are asked again.
       void client.invalidateQueries({ predicate: (q) => q.queryKey[0] !== 'me' });

@@ -144,6 +144,23 @@ export async function heldIds({ page }: Device): Promise<string[]> {
   return jobs.map((job) => job.entry.id);
 }
 
+/** The text of all answers this device keeps, and the names of its caches beside the application's own. */
+export async function keptThings({ page }: Device): Promise<{ answers: string; caches: string[] }> {
+  return page.evaluate(
+    `new Promise((resolve) => {
+      const request = indexedDB.open('keyval-store');
+      request.onsuccess = () => {
+        const all = request.result.transaction('keyval').objectStore('keyval').get('scantling-queries');
+        all.onsuccess = async () =>
+          resolve({
+            answers: all.result ?? '',
+            caches: (await caches.keys()).filter((name) => !name.startsWith('workbox-precache')),
+          });
+      };
+    })`,
+  );
+}
+
 /** What the server has of a bench copy, in its order. */
 export async function onServer({ context }: Device, copyId: string): Promise<StoredEntry[]> {
   const answer = await context.request.get(`/api/bench/${copyId}/entries`);
