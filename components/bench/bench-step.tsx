@@ -5,6 +5,7 @@ import { type BenchState } from '../../shared/plan/bench/fold';
 import { type Step } from '../../shared/plan/document';
 import { ClipPlayer } from '../plans/clip-player';
 import { type PlanValues } from '../plans/plan-model';
+import { StandingLines } from '../plans/standing-lines';
 import { StepPhotos } from '../plans/step-photos';
 import { referencesOf } from '../plans/step-references';
 import { KeptFiles } from '../service-worker/kept-files';
@@ -54,6 +55,7 @@ export function BenchStep(props: BenchStepProps) {
         />
       ) : null}
       <ClipSays step={step} values={values} />
+      <StandingLines step={step} document={copy.document} />
       {step.cautions.map((caution) => (
         <Row key={caution.id} gap={12} align="flex-start">
           <Icon name="caution" size={28} />

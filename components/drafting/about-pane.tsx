@@ -8,7 +8,7 @@ import { Checkbox } from '../ui/checkbox';
 import { FilePick } from '../ui/file-pick';
 import { Stack } from '../ui/layout';
 import { Select } from '../ui/select';
-import { TextArea, TextField } from '../ui/text-field';
+import { LimitedField } from './fields/limited-field';
 import { type DraftEditor } from './use-draft-editor';
 
 const categories = ['jig', 'bench-aid', 'storage', 'furniture', 'toy', 'garden', 'other'] as const;
@@ -37,16 +37,18 @@ export function AboutPane({ editor: { document, change } }: { editor: DraftEdito
   return (
     <Stack gap={16} style={{ maxWidth: 560, paddingTop: 16 }}>
       {fault ? <Banner kind="fails">{fault}</Banner> : null}
-      <TextField
+      <LimitedField
         label="Title"
+        most={limits.title}
         value={document.title}
-        onChange={(title) => set({ title: title.slice(0, limits.title) })}
+        onChange={(title) => set({ title })}
       />
-      <TextArea
+      <LimitedField
+        area
         label="What it is, in a few sentences"
+        most={limits.summary}
         value={document.summary}
-        onChange={(summary) => set({ summary: summary.slice(0, limits.summary) })}
-        limit={limits.summary}
+        onChange={(summary) => set({ summary })}
       />
       <Select
         label="Kind"
@@ -66,8 +68,9 @@ export function AboutPane({ editor: { document, change } }: { editor: DraftEdito
         maxBytes={limits.photoBytes}
         onFiles={(files) => void cover(files[0])}
       />
-      <TextField
+      <LimitedField
         label="What the cover shows, for those who cannot see it"
+        most={limits.note}
         value={document.coverAlt}
         onChange={(coverAlt) => set({ coverAlt })}
       />

@@ -1,11 +1,9 @@
-import { View } from 'react-native';
 import { type Check } from '../../shared/plan/document';
 import { type SheetRow } from '../../shared/plan/sheet';
-import { WorkPanes } from '../ui/layout';
+import { BesideSheet } from './beside-sheet';
 import { CheckSaid } from './check-said';
-import { checkFields } from './list-fields';
-import { ListEditor } from './list-editor';
-import { SheetPane } from './sheet-pane';
+import { checkFields } from './fields/dimensions';
+import { ListEditor } from './fields/list-editor';
 import { type DraftEditor } from './use-draft-editor';
 
 export interface ChecksTabProps {
@@ -23,36 +21,15 @@ export function ChecksTab({ editor, start, onPlace }: ChecksTabProps) {
     return state ? <CheckSaid state={state} editor={editor} /> : null;
   };
   return (
-    <WorkPanes
-      below={150}
-      panes={[
-        {
-          key: 'checks',
-          label: 'Checks',
-          content: (
-            <View style={{ padding: 4, paddingRight: 12 }}>
-              <ListEditor
-                title="Checks"
-                fields={checkFields(model)}
-                items={document.checks}
-                onChange={(checks) => change((d) => ({ ...d, checks }))}
-                start={start}
-                below={said}
-              />
-            </View>
-          ),
-        },
-        {
-          key: 'sheet',
-          label: 'Check sheet',
-          width: 340,
-          content: (
-            <View style={{ padding: 4, paddingHorizontal: 12 }}>
-              <SheetPane model={model} onPlace={onPlace} onChange={change} />
-            </View>
-          ),
-        },
-      ]}
-    />
+    <BesideSheet label="Checks" editor={editor} onPlace={onPlace}>
+      <ListEditor
+        title="Checks"
+        fields={checkFields(model)}
+        items={document.checks}
+        onChange={(fn) => change((d) => ({ ...d, checks: fn(d.checks) }))}
+        start={start}
+        below={said}
+      />
+    </BesideSheet>
   );
 }

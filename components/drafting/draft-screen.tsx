@@ -1,4 +1,4 @@
-import { useLocalSearchParams } from 'expo-router';
+import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useCallback, useState } from 'react';
 import { View } from 'react-native';
 import { type Draft } from '../../shared/api/plans';
@@ -19,18 +19,9 @@ import { CaptionsList, useCues } from './captions-list';
 import { ClipPane } from './clip-pane';
 import { useClipPlace } from './clip-place';
 import { useDraft } from './drafting-queries';
-import {
-  consumableFields,
-  creditFields,
-  hardwareFields,
-  linkFields,
-  partFields,
-  stockFields,
-  toolFields,
-} from './list-fields';
 import { DimensionsTab } from './dimensions/dimensions-tab';
 import { ChecksTab } from './checks-tab';
-import { ListEditor } from './list-editor';
+import { PartsTab, ToolsTab } from './lists-tab';
 import { PublishPane } from './publish-pane';
 import { SheetPane } from './sheet-pane';
 import { StepsPane } from './steps-pane';
@@ -108,27 +99,35 @@ export function keptWords(kept: Kept): string {
   return 'Keeping';
 }
 
+/** The open tab, in the address, so that it is the same after a reload and can be sent to oneself. */
+function useTab() {
+  const { tab: asked } = useLocalSearchParams<{ tab?: string }>();
+  const router = useRouter();
+  const tab = tabs.find(({ value }) => value === asked)?.value ?? 'steps';
+  const setTab = useCallback((next: Tab) => router.setParams({ tab: next }), [router]);
+  return { tab, setTab };
+}
+
 function Editing({ draft }: { draft: Draft }) {
   const editor = useDraftEditor(draft);
-  const { document, change, kept } = editor;
-  const [tab, setTab] = useState<Tab>('steps');
+  const { document, kept } = editor;
+  const { tab, setTab } = useTab();
   const [step, setStep] = useState<string | null>(null);
   const [dimension, setDimension] = useState<string | null>(null);
-  const [check, setCheck] = useState<string | null>(null);
-  const toPlace = useCallback(({ place: { in: list, elementId } }: SheetRow) => {
-    if (list === 'steps') setStep(elementId);
-    if (list === 'dimensions') setDimension(elementId);
-    if (list === 'checks') setCheck(elementId);
-    setTab(list === 'steps' ? 'steps' : (tabOf[list] ?? 'about'));
-  }, []);
-  const list = <
-    K extends 'consumables' | 'credits' | 'parts' | 'stock' | 'hardware' | 'tools' | 'links',
-  >(
-    key: K,
-  ) => ({
-    items: document[key],
-    onChange: (items: (typeof document)[K]) => change((d) => ({ ...d, [key]: items })),
-  });
+  /** The element of a list that a row of the sheet led to. */
+  const [element, setElement] = useState<string | null>(null);
+  const { steps } = document;
+  const toPlace = useCallback(
+    ({ place: { in: list, elementId } }: SheetRow) => {
+      if (list === 'steps') setStep(elementId);
+      else if (list === 'photos')
+        setStep(steps.find((s) => elementId && s.photoIds.includes(elementId))?.id ?? null);
+      else if (list === 'dimensions') setDimension(elementId);
+      else setElement(elementId);
+      setTab(tabOf[list] ?? 'about');
+    },
+    [setTab, steps],
+  );
   return (
     <>
       <PageHead title={document.title || 'Untitled'} back="/drafting" sub={keptWords(kept)} />
@@ -155,26 +154,13 @@ function Editing({ draft }: { draft: Draft }) {
             />
           ) : null}
           {tab === 'checks' ? (
-            <ChecksTab key={check} editor={editor} start={check} onPlace={toPlace} />
+            <ChecksTab key={element} editor={editor} start={element} onPlace={toPlace} />
           ) : null}
           {tab === 'parts' ? (
-            <>
-              <ListEditor title="Parts" fields={partFields(document)} {...list('parts')} />
-              <ListEditor title="Stock" fields={stockFields(document)} {...list('stock')} />
-              <ListEditor title="Hardware" fields={hardwareFields} {...list('hardware')} />
-              <ListEditor
-                title="Glue, finish, abrasives"
-                fields={consumableFields}
-                {...list('consumables')}
-              />
-            </>
+            <PartsTab key={element} editor={editor} start={element} onPlace={toPlace} />
           ) : null}
           {tab === 'tools' ? (
-            <>
-              <ListEditor title="Tools" fields={toolFields} {...list('tools')} />
-              <ListEditor title="Links" fields={linkFields} {...list('links')} />
-              <ListEditor title="Credits" fields={creditFields} {...list('credits')} />
-            </>
+            <ToolsTab key={element} editor={editor} start={element} onPlace={toPlace} />
           ) : null}
           {tab === 'about' ? <AboutPane editor={editor} /> : null}
           {tab === 'publish' ? <PublishPane draft={draft} editor={editor} /> : null}
@@ -194,6 +180,9 @@ const tabOf: Partial<Record<SheetRow['place']['in'], Tab>> = {
   hardware: 'parts',
   tools: 'tools',
   links: 'tools',
+  clip: 'steps',
+  photos: 'steps',
+  steps: 'steps',
 };
 
 interface StepsTabProps {

@@ -1,5 +1,6 @@
 import { useRouter } from 'expo-router';
 import { useMemo, useState } from 'react';
+import { limits } from '../../shared/api/limits';
 import { type Draft } from '../../shared/api/plans';
 import { checkSheet, type SheetRow } from '../../shared/plan/sheet';
 import { tell } from '../data/problems';
@@ -16,31 +17,36 @@ import { useMovePlan, usePublish } from './drafting-queries';
 import { SavePlanFile } from './plan-file';
 import { type DraftEditor } from './use-draft-editor';
 
+/** The shortest reason for publishing over a failing must, in characters. */
+const shortestReason = limits.reasonMin;
 const keyOf = (row: SheetRow) => `${row.rule}/${row.place.elementId ?? ''}`;
 
 /** The check sheet, publishing, and what was published before. */
 export function PublishPane({ draft, editor }: { draft: Draft; editor: DraftEditor }) {
   const router = useRouter();
   const publish = usePublish(draft.id);
-  const sheet = useMemo(() => checkSheet(editor.document, undefined, 'publish'), [editor.document]);
+  const sheet = useMemo(() => checkSheet(editor.document, editor.model, 'publish'), [editor]);
   const [reasons, setReasons] = useState<Record<string, string>>({});
   const [note, setNote] = useState('');
   const [unsaved, setUnsaved] = useState(false);
   const failing = sheet.rows.filter((row) => row.verdict === 'fails');
+  const [asked, setAsked] = useState(false);
+  const short = (row: SheetRow) =>
+    row.verdict === 'fails' && (reasons[keyOf(row)] ?? '').trim().length < shortestReason;
   const send = async () => {
     setUnsaved(false);
+    setAsked(true);
+    if (failing.some(short)) return;
     if (!(await editor.saveNow())) return setUnsaved(true);
     publish.mutate(
       {
         version: editor.version(),
         note,
-        overrides: failing
-          .filter((row) => reasons[keyOf(row)])
-          .map((row) => ({
-            rule: row.rule,
-            elementId: row.place.elementId,
-            reason: reasons[keyOf(row)] ?? '',
-          })),
+        overrides: failing.map((row) => ({
+          rule: row.rule,
+          elementId: row.place.elementId,
+          reason: reasons[keyOf(row)] ?? '',
+        })),
       },
       { onSuccess: ({ slug }) => router.push(`/plans/${slug}`) },
     );
@@ -69,6 +75,12 @@ export function PublishPane({ draft, editor }: { draft: Draft; editor: DraftEdit
                 label={`Publish all the same, because (readers see it): ${row.rule}`}
                 value={reasons[keyOf(row)] ?? ''}
                 onChange={(text) => setReasons({ ...reasons, [keyOf(row)]: text })}
+                limit={limits.reason}
+                error={
+                  asked && short(row)
+                    ? `Readers see it: at least ${shortestReason} characters. Nothing was published yet.`
+                    : undefined
+                }
               />
             ) : null}
             <Rule />
@@ -84,7 +96,12 @@ export function PublishPane({ draft, editor }: { draft: Draft; editor: DraftEdit
           </Banner>
         ) : null}
         {publish.isError ? <Banner kind="fails">{tell(publish.error).text}</Banner> : null}
-        <TextArea label="What is new in this revision" value={note} onChange={setNote} />
+        <TextArea
+          label="What is new in this revision"
+          value={note}
+          onChange={setNote}
+          limit={limits.reason}
+        />
         <Row>
           <Button
             kind="primary"

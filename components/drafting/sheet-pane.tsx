@@ -9,6 +9,7 @@ import { Row, Rule, Stack } from '../ui/layout';
 import { PressArea } from '../ui/pressable';
 import { Text } from '../ui/text';
 import { VerdictShape, verdictKind, Verdict } from '../ui/verdict';
+import { SwitchedOff, SwitchOff } from './switch-off';
 
 export interface SheetPaneProps {
   model: PlanModel;
@@ -49,6 +50,7 @@ export function SheetPane({ model, onPlace, onChange }: SheetPaneProps) {
           />
         </Row>
       ) : null}
+      <SwitchedOff document={worked.document} onChange={onChange} />
       <Verdict kind="holds" word={`${sheet.quiet} rules hold`} />
     </Stack>
   );
@@ -97,6 +99,7 @@ const SheetLine = memo(function SheetLine({ row, mends, onPlace, onChange }: She
           ))}
         </Row>
       ) : null}
+      {row.level === 'must' ? null : <SwitchOff row={row} onChange={onChange} />}
       <Rule />
     </Stack>
   );

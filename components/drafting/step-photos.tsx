@@ -11,8 +11,8 @@ import { Button } from '../ui/button';
 import { FilePick } from '../ui/file-pick';
 import { Row, Stack } from '../ui/layout';
 import { Progress } from '../ui/progress';
-import { TextField } from '../ui/text-field';
 import { colour, line } from '../ui/tokens';
+import { LimitedField } from './fields/limited-field';
 import { type DraftEditor } from './use-draft-editor';
 
 /** The plan with a photo added to one of its steps. */
@@ -64,9 +64,7 @@ export function StepPhotos({ step, editor }: { step: Step; editor: DraftEditor }
   const say = (photo: Photo, alt: string) =>
     change((d) => ({
       ...d,
-      photos: d.photos.map((p) =>
-        p.id === photo.id ? { ...p, alt: alt.slice(0, limits.note) } : p,
-      ),
+      photos: d.photos.map((p) => (p.id === photo.id ? { ...p, alt } : p)),
     }));
   return (
     <Stack gap={12}>
@@ -83,8 +81,9 @@ export function StepPhotos({ step, editor }: { step: Step; editor: DraftEditor }
             style={styles.picture}
             resizeMode="contain"
           />
-          <TextField
+          <LimitedField
             label={`What photo ${i + 1} shows, for those who cannot see it`}
+            most={limits.note}
             value={photo.alt}
             onChange={(alt) => say(photo, alt)}
           />

@@ -5,16 +5,16 @@ import { type Step } from '../../shared/plan/document';
 import { clockTime } from '../../shared/plan/stick/spoken';
 import { stickOf } from '../plans/plan-stick-input';
 import { StoryStick } from '../story-stick/story-stick';
-import { toast } from '../ui/announcer';
 import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
 import { IconButton } from '../ui/icon-button';
 import { Row, Rule, Section, Stack } from '../ui/layout';
 import { EmptyState } from '../ui/states';
 import { Text } from '../ui/text';
+import { usePhone } from '../ui/use-media';
 import { type ClipPlace } from './clip-place';
 import { DragHandle, DropPlace } from './drag-order';
-import { StepEditor } from './step-editor';
+import { StepEditor } from './step/step-editor';
 import { StepPhotos } from './step-photos';
 import { useStepEdits } from './use-step-edits';
 import { withDimension } from './with-dimension';
@@ -33,20 +33,8 @@ export interface StepsPaneProps {
 export function StepsPane({ editor, place, cues, open, setOpen }: StepsPaneProps) {
   const { document, change } = editor;
   const stick = useMemo(() => stickOf(document, {}), [document]);
-  const { setSteps, replace, move, moveTo, mark, start, add } = useStepEdits(
-    editor,
-    place,
-    open,
-    setOpen,
-  );
-  const remove = (step: Step) => {
-    const before = document.steps;
-    setSteps((steps) => steps.filter((s) => s.id !== step.id));
-    toast({
-      text: `“${step.title}” is out.`,
-      action: { label: 'Put it back', onPress: () => change((d) => ({ ...d, steps: before })) },
-    });
-  };
+  const edits = useStepEdits(editor, place, open, setOpen);
+  const { move, moveTo, mark, start, add } = edits;
   return (
     <Section>
       <Heading level={2} note={String(document.steps.length)}>
@@ -97,10 +85,10 @@ export function StepsPane({ editor, place, cues, open, setOpen }: StepsPaneProps
                     document={document}
                     now={place.now}
                     onMark={mark}
-                    onChange={replace}
+                    onChange={(fn) => edits.change(step.id, fn)}
                     onDimension={(heard) => change((d) => withDimension(d, step.id, heard))}
                     photos={<StepPhotos step={step} editor={editor} />}
-                    onRemove={() => remove(step)}
+                    onRemove={() => edits.remove(step)}
                   />
                 ) : null}
               </Stack>
@@ -126,6 +114,7 @@ interface StepLineProps {
 
 /** A step while it is closed: number, title, time, order. */
 function StepLine({ step, number, open, onMove, onOpen }: StepLineProps) {
+  const phone = usePhone();
   return (
     <Row gap={8} justify="space-between">
       <DragHandle id={step.id} label={`Drag step ${number}`} />
@@ -135,8 +124,12 @@ function StepLine({ step, number, open, onMove, onOpen }: StepLineProps) {
           {step.stretches[0] ? clockTime(step.stretches[0].start) : ''}
         </Text>
       </Text>
-      <IconButton icon="up" label={`Move step ${number} up`} onPress={() => onMove(-1)} />
-      <IconButton icon="down" label={`Move step ${number} down`} onPress={() => onMove(1)} />
+      {phone && !open ? null : (
+        <>
+          <IconButton icon="up" label={`Move step ${number} up`} onPress={() => onMove(-1)} />
+          <IconButton icon="down" label={`Move step ${number} down`} onPress={() => onMove(1)} />
+        </>
+      )}
       <Button
         size="small"
         label={open ? `Close step ${number}` : `Open step ${number}`}

@@ -1,6 +1,7 @@
 import { v7 as uuid } from 'uuid';
-import { stepSchema, type Step } from '../../shared/plan/document';
+import { stepSchema, type PlanDocument, type Step } from '../../shared/plan/document';
 import { toast } from '../ui/announcer';
+import { putBack } from './fields/list-editor';
 import { type ClipPlace } from './clip-place';
 import { type DraftEditor } from './use-draft-editor';
 
@@ -25,6 +26,20 @@ export function reordered(steps: readonly Step[], id: string, to: number): Step[
   return rest;
 }
 
+/** A step that begins where the clip is. */
+function newStep({ clip }: PlanDocument, now: number): Step {
+  const stretches = clip.source === 'none' ? [] : [{ start: now, end: now + 10 }];
+  return stepSchema.parse({ id: uuid(), title: '', stretches });
+}
+
+/** The steps with one more, before the first that begins later in the clip, else at the end. */
+function placedByTime(steps: readonly Step[], step: Step): Step[] {
+  const start = step.stretches[0]?.start;
+  const after =
+    start === undefined ? -1 : steps.findIndex((s) => (s.stretches[0]?.start ?? -1) > start);
+  return reordered([...steps, step], step.id, after < 0 ? steps.length : after);
+}
+
 /** What can be done to the steps; marks that were dragged can be put back. */
 export function useStepEdits(
   { document, change }: DraftEditor,
@@ -37,7 +52,18 @@ export function useStepEdits(
     setSteps((steps) => steps.map((s) => (s.id === id ? fn(s) : s)));
   return {
     setSteps,
-    replace: (step: Step) => one(step.id, () => step),
+    change: one,
+    remove: (gone: Step) => {
+      const at = document.steps.findIndex((s) => s.id === gone.id);
+      setSteps((steps) => steps.filter((s) => s.id !== gone.id));
+      toast({
+        text: `“${gone.title || 'The step'}” is out.`,
+        action: {
+          label: 'Put it back',
+          onPress: () => setSteps((steps) => putBack(steps, gone, at)),
+        },
+      });
+    },
     move: (id: string, by: number) =>
       setSteps((steps) => reordered(steps, id, steps.findIndex((s) => s.id === id) + by)),
     moveTo: (id: string, to: number) => setSteps((steps) => reordered(steps, id, to)),
@@ -45,30 +71,25 @@ export function useStepEdits(
       if (id) one(id, (step) => withMark(step, which, place.now));
     },
     start: (id: string, at: number, how: 'drag' | 'nudge') => {
-      const before = document.steps;
+      const before = document.steps.find((s) => s.id === id)?.stretches[0];
       one(id, (step) => withMark(step, 'start', at));
-      if (how === 'drag') {
-        toast({
-          text: 'The mark was moved.',
-          action: { label: 'Put it back', onPress: () => change((d) => ({ ...d, steps: before })) },
-        });
-      }
+      if (how !== 'drag') return;
+      toast({
+        text: 'The mark was moved.',
+        action: {
+          label: 'Put it back',
+          // Only the mark goes back; what was written since stays.
+          onPress: () =>
+            one(id, (step) => ({
+              ...step,
+              stretches: [...(before ? [before] : []), ...step.stretches.slice(1)],
+            })),
+        },
+      });
     },
     add: () => {
-      const step = stepSchema.parse({
-        id: uuid(),
-        title: '',
-        stretches:
-          document.clip.source === 'none' ? [] : [{ start: place.now, end: place.now + 10 }],
-      });
-      setSteps((steps) => {
-        const after = steps.findIndex((s) => (s.stretches[0]?.start ?? -1) > place.now);
-        return reordered(
-          [...steps, step],
-          step.id,
-          document.clip.source === 'none' || after < 0 ? steps.length : after,
-        );
-      });
+      const step = newStep(document, place.now);
+      setSteps((steps) => placedByTime(steps, step));
       setOpen(step.id);
     },
   };

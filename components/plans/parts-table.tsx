@@ -17,6 +17,11 @@ function sizesOf(part: Part, values: PlanValues): (FigureParts | null)[] {
   );
 }
 
+/** A part's length, width and thickness in a line. */
+export function PartSize({ part, values }: { part: Part; values: PlanValues }) {
+  return <Size figures={sizesOf(part, values)} />;
+}
+
 function Size({ figures }: { figures: (FigureParts | null)[] }) {
   const known = figures.filter((f): f is FigureParts => f !== null);
   return (

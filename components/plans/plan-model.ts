@@ -47,16 +47,21 @@ export function dimensionFigure(
   });
 }
 
+/** The figures of a model as this preference shows them. */
+export function valuesOf(model: PlanModel, preference: DisplayPreference): PlanValues {
+  const length = (mm: number | null | undefined) =>
+    mm === null || mm === undefined || !Number.isFinite(mm) ? null : displayMm(mm, preference);
+  const figure = (dimensionId: string) =>
+    dimensionFigure(model.dimensions.get(dimensionId), preference);
+  return { model, preference, figure, length };
+}
+
 /** Evaluates the plan, with readings where there are some. */
 export function usePlanValues(document: PlanDocument, readings?: ModelReadings): PlanValues {
   const [{ units, inchGrid }] = usePreferences();
   const model = useMemo(() => createModel(document, readings ?? null), [document, readings]);
-  return useMemo(() => {
-    const preference: DisplayPreference = { system: units, instrument: 'tape', grid: inchGrid };
-    const length = (mm: number | null | undefined) =>
-      mm === null || mm === undefined || !Number.isFinite(mm) ? null : displayMm(mm, preference);
-    const figure = (dimensionId: string) =>
-      dimensionFigure(model.dimensions.get(dimensionId), preference);
-    return { model, preference, figure, length };
-  }, [model, units, inchGrid]);
+  return useMemo(
+    () => valuesOf(model, { system: units, instrument: 'tape', grid: inchGrid }),
+    [model, units, inchGrid],
+  );
 }

@@ -5,6 +5,7 @@ import { Row, Stack } from '../ui/layout';
 import { Prose } from '../ui/prose';
 import { Text } from '../ui/text';
 import { type PlanValues } from './plan-model';
+import { StandingLines } from './standing-lines';
 import { StepPhotos } from './step-photos';
 import { referencesOf } from './step-references';
 
@@ -45,6 +46,7 @@ export function StepBody({
           })}
         </Row>
       ) : null}
+      <StandingLines step={step} document={document} />
       {step.cautions.map((caution) => (
         <Row key={caution.id} gap={8} align="flex-start">
           <Icon name="caution" size={20} />

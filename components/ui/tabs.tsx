@@ -1,5 +1,5 @@
 import { Link as RouterLink, type Href } from 'expo-router';
-import { type ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { arrowKeys, spacePresses } from './arrow-keys';
 import { PressArea } from './pressable';
@@ -35,8 +35,15 @@ export function Tabs<V extends string>({
   id,
   fill = true,
 }: TabsProps<V>) {
+  const row = useRef<View>(null);
+  // On a phone the row is longer than the screen: the chosen one is brought into sight.
+  useEffect(() => {
+    const list = row.current as unknown as HTMLElement | null;
+    const tab = list?.querySelector<HTMLElement>('[aria-selected="true"]');
+    if (list && tab) list.scrollLeft = tab.offsetLeft - (list.clientWidth - tab.clientWidth) / 2;
+  }, [value]);
   return (
-    <View role="tablist" aria-label={label} style={styles.row}>
+    <View role="tablist" aria-label={label} style={styles.row} ref={row}>
       {tabs.map((tab) => {
         const on = tab.value === value;
         const choose = () => onChange(tab.value);

@@ -14,6 +14,7 @@ export const limits = {
   stepText: 8000,
   commentText: 8000,
   reason: 4000,
+  reasonMin: 10,
   url: 2000,
   steps: 400,
   dimensions: 12_000,

@@ -204,7 +204,7 @@ export const publishPlan = contract({
           reason: z
             .string()
             .trim()
-            .min(10, 'Write the reason readers will see.')
+            .min(limits.reasonMin, 'Write the reason readers will see.')
             .max(limits.reason),
         }),
       )

@@ -6,18 +6,23 @@ import { Heading } from '../../ui/heading';
 import { Row, Stack } from '../../ui/layout';
 import { Select } from '../../ui/select';
 import { TextField } from '../../ui/text-field';
-import { OneField } from '../list-editor';
-import { dimensionFields } from '../list-fields';
+import { dimensionFields } from '../fields/dimensions';
+import { OneField } from '../fields/one-field';
 import { type DetailProps } from './detail-props';
 
 /** Name, symbol and all the fields that do not stand in the row. */
 export function DimensionFields({ dimension: d, editor, onChange, onRemove }: DetailProps) {
-  const fields = dimensionFields(editor.document);
+  const fields = dimensionFields(editor.document, d);
   return (
     <Stack gap={12}>
       <Heading level={3}>Fields</Heading>
       {fields.map((field) => (
-        <OneField key={`${d.id}-${field.key}`} field={field} item={d} onChange={onChange} />
+        <OneField
+          key={`${d.id}-${field.key}`}
+          field={field}
+          item={d}
+          onChange={(fn) => onChange(fn(d))}
+        />
       ))}
       <ToleranceFields
         key={d.id}
