@@ -27,12 +27,14 @@ if (typeof document !== 'undefined')
   });
 
 /**
- * Keeps a draft's unsaved state in the browser, so that a closed tab loses nothing: a moment after the last of
- * quick changes, since a large plan takes milliseconds to write, and at once when the page goes.
+ * Keeps a draft's unsaved state in the browser, so that a closed tab loses nothing: at once after a pause, then a moment
+ * after the last of quick changes, since a large plan takes milliseconds to write, and at once when the page goes.
  */
 export function keepLocal(planId: string, kept: KeptDraft): void {
   waiting.set(planId, kept);
-  timer ??= setTimeout(writeWaiting, pause);
+  if (timer !== undefined) return;
+  writeWaiting();
+  timer = setTimeout(writeWaiting, pause);
 }
 export const readLocal = (planId: string): Promise<KeptDraft | undefined> =>
   get<KeptDraft>(key(planId)).catch(() => undefined);

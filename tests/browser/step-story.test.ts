@@ -117,16 +117,19 @@ describe('a creator works on a step', () => {
   story(
     'switches a rule off with a reason, and on again; the open tab outlives a reload',
     async (stage) => {
-      const { page } = await ownCopy(stage, 1280);
-      await page.getByRole('tab', { name: 'Parts and stock' }).click();
-      await page.getByRole('button', { name: /^Open A / }).click();
-      await page.getByLabel('Length', { exact: true }).fill('base_l + 0 * bed_w');
-      await page.getByRole('tab', { name: 'About' }).click();
-      await page.getByLabel('What the cover shows, for those who cannot see it').fill('');
+      const { page, kept } = await ownCopy(stage, 1280);
+      await page.getByRole('button', { name: 'Open step 1', exact: true }).click();
+      const line = /No gloves, loose sleeves/;
+      await page.getByRole('button', { name: /^What is done/ }).click();
+      await page.getByRole('button', { name: 'A cut' }).click();
+      await page.getByRole('button', { name: line }).click();
+      await kept('safety/loose-clothing');
       await page.getByRole('tab', { name: 'Tools and links' }).click();
       await page.reload();
       await page.getByRole('tab', { name: 'Tools and links', selected: true }).waitFor();
-      const off = page.getByRole('button', { name: /^Switch .* off here$/ }).first();
+      const off = page
+        .getByRole('button', { name: /^Switch safety.loose-clothing off here$/ })
+        .first();
       const rule =
         /^Switch (.*) off here$/.exec((await off.getAttribute('aria-label')) ?? '')?.[1] ?? '';
       await off.click();
