@@ -1,7 +1,7 @@
 // `npm run dev`: the API and the app with reload, on one address. The dev server passes /api,
 // /media and /local on (metro.config.js), so cookies work as in the built product.
 import { join } from 'node:path';
-import { ensureDebian, postgresThere } from './lib/debian.mjs';
+import { ensureDebian, ffmpegThere, postgresThere } from './lib/debian.mjs';
 import { claimLocalData } from './lib/one-at-a-time.mjs';
 import { ensurePackages } from './lib/packages.mjs';
 import { local, root, webDir } from './lib/paths.mjs';
@@ -32,6 +32,7 @@ try {
   if (!process.env.DATABASE_URL) {
     await step('PostgreSQL installed', () => ensureDebian('postgresql', postgresThere));
   }
+  await step('ffmpeg installed', () => ensureDebian('ffmpeg', ffmpegThere));
   const { createProduct } = await loadTypeScript('server/local/product.ts');
   product = createProduct({ port, dataDir: local, webDir, server: 'apart' });
   for (const [name, work] of product.steps) await step(name, work);

@@ -1,6 +1,6 @@
 // `npm start`: the whole product on this machine, from nothing. Plain Node, since nothing is
 // installed yet when it begins.
-import { ensureDebian, postgresThere } from './lib/debian.mjs';
+import { ensureDebian, ffmpegThere, postgresThere } from './lib/debian.mjs';
 import { claimLocalData } from './lib/one-at-a-time.mjs';
 import { ensurePackages } from './lib/packages.mjs';
 import { local, webDir } from './lib/paths.mjs';
@@ -55,6 +55,7 @@ try {
   if (!process.env.DATABASE_URL) {
     await step('PostgreSQL installed', () => ensureDebian('postgresql', postgresThere));
   }
+  await step('ffmpeg installed', () => ensureDebian('ffmpeg', ffmpegThere));
   await step('web app', ensureWebApp);
   const { createProduct } = await loadTypeScript('server/local/product.ts');
   product = createProduct({ port, dataDir: local, webDir });

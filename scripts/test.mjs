@@ -2,7 +2,7 @@
 // arguments run those alone: `npm test -- unit api`.
 import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { chromiumThere, ensureDebian, postgresThere } from './lib/debian.mjs';
+import { chromiumThere, ensureDebian, ffmpegThere, postgresThere } from './lib/debian.mjs';
 import { ensurePackages } from './lib/packages.mjs';
 import { local, root } from './lib/paths.mjs';
 import { endAll, run, tail } from './lib/run.mjs';
@@ -125,6 +125,7 @@ const wants = (name) => chosen.length === 0 || chosen.includes(name);
 await stage('packages', ensurePackages);
 if (wants('api') || wants('browser')) {
   await stage('postgresql', () => ensureDebian('postgresql', postgresThere));
+  await stage('ffmpeg', () => ensureDebian('ffmpeg', ffmpegThere));
 }
 if (wants('browser')) await stage('chromium', () => ensureDebian('chromium', chromiumThere));
 for (const [name, work] of Object.entries(stages)) {

@@ -3,6 +3,7 @@ import pino from 'pino';
 import { createApp } from './app';
 import { makeDataSource } from './db/data-source';
 import { readEnv, type Env } from './env';
+import { startMediaWork } from './features/media/work';
 import { startJobs } from './jobs/jobs';
 import { makeStorage } from './storage/storage';
 
@@ -13,7 +14,9 @@ async function serve(env: Env): Promise<void> {
   const storage = makeStorage(env);
   await storage.ensureBucket();
   const jobs = await startJobs(env, log);
-  const app = createApp({ env, db, storage, jobs, log, now: () => new Date() });
+  const deps = { env, db, storage, jobs, log, now: () => new Date() };
+  const app = createApp(deps);
+  await startMediaWork(deps);
   const server = createServer(app);
   server.once('error', (error: NodeJS.ErrnoException) => {
     const taken = error.code === 'EADDRINUSE';

@@ -9,7 +9,7 @@ export interface KeptFile {
   bytes: number;
 }
 
-/** Addresses of everything the steps of a plan show: pictures, captions and the clip, each once. */
+/** Addresses of the everything the steps of a plan show: pictures, captions and the clip, each once. */
 export function filesOf(document: PlanDocument): string[] {
   const { clip, cover, photos, steps } = document;
   const used = new Set(steps.flatMap((step) => step.photoIds));
@@ -18,7 +18,7 @@ export function filesOf(document: PlanDocument): string[] {
     ...photos.filter((photo) => used.has(photo.id)).map((photo) => mediaPath(photo.media, 'large')),
     ...(clip.source !== 'none' && clip.captions ? [mediaPath(clip.captions, 'original')] : []),
     // Last: it is by far the largest, and the rest should not wait for it.
-    ...(clip.source === 'upload' ? [mediaPath(clip.media, 'original')] : []),
+    ...(clip.source === 'upload' ? [mediaPath(clip.media, '720')] : []),
   ];
   return [...new Set(paths)];
 }
@@ -28,7 +28,9 @@ const open = () => caches.open(keptFilesCache);
 async function answerTo(path: string, method: 'HEAD' | 'GET', signal: AbortSignal) {
   let response: Response;
   try {
-    response = await fetch(path, { method, credentials: 'same-origin', signal });
+    // Asked for by name, so that what is kept of a photo is a form every such browser shows.
+    const headers = { Accept: 'image/webp,*/*' };
+    response = await fetch(path, { method, credentials: 'same-origin', headers, signal });
   } catch (error) {
     if (signal.aborted) throw error;
     throw new NoSignal();

@@ -21,7 +21,11 @@ export type KeptState =
   | { at: 'stopped'; bytes: number; reason: string }
   | { at: 'no-room'; bytes: number; room: number | null };
 
+/** What the records of this version mean: since 2 a clip is kept as it is shown, not as it was uploaded. */
+const form = 2;
 interface KeptRecord {
+  /** Missing in those of the first version. */
+  form?: number;
   choice: 'keep' | 'leave-out' | 'undecided';
   files: KeptFile[];
   /** Some file was not to be had: they are measured again at the next opening. */
@@ -66,13 +70,16 @@ function savesData(): boolean {
 /** Sizes of the copy's files: as noted when they were measured before, or asked of the server. */
 async function measured(copyId: string, document: PlanDocument): Promise<KeptRecord> {
   const known = (await readAll())[copyId];
-  if (known && !known.partly) return known;
+  if (known?.form === form && !known.partly) return known;
   const signal = new AbortController().signal;
-  const found = await Promise.all(filesOf(document).map((path) => measureFile(path, signal)));
+  const paths = filesOf(document);
+  const found = await Promise.all(paths.map((path) => measureFile(path, signal)));
   const files = found.filter((file) => file !== null);
   const choice = known?.choice ?? 'undecided';
-  const fresh: KeptRecord = { choice, files, partly: files.length < found.length };
+  const stale = only(await readAll(), copyId).filter((path) => !paths.includes(path));
+  const fresh: KeptRecord = { form, choice, files, partly: files.length < found.length };
   await record(copyId, fresh);
+  await dropFromCache(stale);
   return fresh;
 }
 
@@ -118,7 +125,7 @@ export async function keepFiles(copyId: string): Promise<void> {
   if (running.has(copyId)) return;
   const stop = new AbortController();
   running.set(copyId, stop);
-  const known: KeptRecord = (await readAll())[copyId] ?? { choice: 'keep', files: [] };
+  const known: KeptRecord = (await readAll())[copyId] ?? { form, choice: 'keep', files: [] };
   const { files } = known;
   const bytes = total(files);
   try {
@@ -150,7 +157,7 @@ export async function leaveOut(copyId: string): Promise<void> {
   running.delete(copyId);
   const records = await readAll();
   const files = records[copyId]?.files ?? [];
-  await record(copyId, { choice: 'leave-out', files });
+  await record(copyId, { form, choice: 'leave-out', files });
   await dropFromCache(only(records, copyId));
   set(copyId, { at: 'left-out', bytes: total(files) });
 }

@@ -33,6 +33,7 @@ export const keys = {
   person: (handle: string) => ['person', handle] as const,
   people: (q: string) => ['people', q] as const,
   captions: (hash: string) => ['captions', hash] as const,
+  ownMedia: (hash: string) => ['own-media', hash] as const,
 };
 
 /** What must open with no signal is kept in the browser. */

@@ -4,11 +4,13 @@ import { uploadCaptions, uploadClip } from '../../shared/api/media';
 import { limits } from '../../shared/api/limits';
 import { jot, readCaptions, toDraft } from '../../shared/captions';
 import { Rational } from '../../shared/measure';
-import { stepSchema, type PlanDocument } from '../../shared/plan/document';
+import { stepSchema, type Clip, type PlanDocument } from '../../shared/plan/document';
 import { clockTime } from '../../shared/plan/stick/spoken';
 import { upload } from '../data/api-client';
 import { tell } from '../data/problems';
 import { ClipPlayer } from '../plans/clip-player';
+import { MediaLine } from '../uploads/media-line';
+import { useOwnMedia } from '../uploads/media-queries';
 import { Banner } from '../ui/banner';
 import { Button } from '../ui/button';
 import { FilePick } from '../ui/file-pick';
@@ -127,6 +129,21 @@ function useClipFiles({ document, change }: Pick<DraftEditor, 'document' | 'chan
   return { progress, trouble, found, bringClip, bringCaptions };
 }
 
+/** The clip once it can play; until then how far it is. */
+function DraftClip({ clip, place }: { clip: Clip; place: ClipPlace }) {
+  const hash = clip.source === 'upload' ? clip.media : undefined;
+  const { data: media } = useOwnMedia(hash);
+  const playable = !media || media.renditions.includes('720');
+  return (
+    <>
+      {hash ? <MediaLine hash={hash} /> : null}
+      {playable ? (
+        <ClipPlayer clip={clip} seek={place.seek} onTime={place.setNow} label="Clip of the draft" />
+      ) : null}
+    </>
+  );
+}
+
 /** The clip and its captions: brought, watched, turned into steps. */
 export function ClipPane({
   editor: { document, change },
@@ -149,7 +166,7 @@ export function ClipPane({
       {clip.source === 'none' ? (
         <Text tone="ink2">Bring a clip, or the address of a video hosted elsewhere.</Text>
       ) : (
-        <ClipPlayer clip={clip} seek={place.seek} onTime={place.setNow} label="Clip of the draft" />
+        <DraftClip clip={clip} place={place} />
       )}
       {clip.source === 'none' ? null : (
         <Text mono>

@@ -8,6 +8,7 @@ import { upload } from '../data/api-client';
 import { tell } from '../data/problems';
 import { Banner } from '../ui/banner';
 import { Button } from '../ui/button';
+import { MediaLine } from '../uploads/media-line';
 import { FilePick } from '../ui/file-pick';
 import { Row, Stack } from '../ui/layout';
 import { Progress } from '../ui/progress';
@@ -81,6 +82,7 @@ export function StepPhotos({ step, editor }: { step: Step; editor: DraftEditor }
             style={styles.picture}
             resizeMode="contain"
           />
+          <MediaLine hash={photo.media} />
           <LimitedField
             label={`What photo ${i + 1} shows, for those who cannot see it`}
             most={limits.note}

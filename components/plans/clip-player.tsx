@@ -101,7 +101,7 @@ function OwnClip({
       preload="metadata"
       aria-label={label}
       poster={cover ? mediaPath(cover, 'large') : undefined}
-      src={mediaPath(media, 'original')}
+      src={mediaPath(media, '720')}
       onTimeUpdate={tick}
       onLoadedMetadata={() => {
         if (video.current && from !== undefined) video.current.currentTime = from;
@@ -113,21 +113,34 @@ function OwnClip({
   );
 }
 
-/** Captions come from another origin, which a track may not load: they are fetched and handed over as a blob. */
+const tracks = new Map<string, Promise<string | null>>();
+
+/**
+ * Captions come from another origin, which a track may not load: they are fetched and handed over as a blob,
+ * one for all players of a page and for as long as it stays, since a player may still be reading it.
+ */
+function captionTrack(hash: string): Promise<string | null> {
+  const known = tracks.get(hash);
+  if (known) return known;
+  const made = loadText(mediaPath(hash, 'original')).then((text) => {
+    if (text !== null) return URL.createObjectURL(new Blob([text], { type: 'text/vtt' }));
+    tracks.delete(hash);
+    return null;
+  });
+  tracks.set(hash, made);
+  return made;
+}
+
 function useCaptionTrack(hash: string | undefined): string | null {
   const [address, setAddress] = useState<string | null>(null);
   useEffect(() => {
     if (!hash) return;
-    let url: string | null = null;
     let gone = false;
-    void loadText(mediaPath(hash, 'original')).then((text) => {
-      if (gone || text === null) return;
-      url = URL.createObjectURL(new Blob([text], { type: 'text/vtt' }));
-      setAddress(url);
+    void captionTrack(hash).then((url) => {
+      if (!gone) setAddress(url);
     });
     return () => {
       gone = true;
-      if (url) URL.revokeObjectURL(url);
     };
   }, [hash]);
   return address;

@@ -46,9 +46,13 @@ for (const [address, file] of dynamicPages) {
 
 /** A kept file, or the part of it a player asks for; what is not kept goes to the network untouched. */
 registerRoute(
-  ({ url, sameOrigin }) => sameOrigin && /^\/media\/[0-9a-f]{64}\/\w+$/.test(url.pathname),
+  ({ url, sameOrigin }) => sameOrigin && /^\/media\/[0-9a-f]{64}\/[\w.-]+$/.test(url.pathname),
   async ({ request, url }) => {
-    const kept = await caches.match(url.pathname, { cacheName: keptFilesCache });
+    // Copies opened with the first version hold their clip under its old name until they are measured again.
+    const old = url.pathname.replace(/\/720$/, '/original');
+    const kept =
+      (await caches.match(url.pathname, { cacheName: keptFilesCache })) ??
+      (await caches.match(old, { cacheName: keptFilesCache }));
     if (!kept) return fetch(request);
     return request.headers.has('range') ? createPartialResponse(request, kept) : kept;
   },

@@ -12,6 +12,7 @@ export function postgresThere() {
   return existsSync(base) && readdirSync(base).some((v) => existsSync(join(base, v, 'bin/initdb')));
 }
 
+export const ffmpegThere = () => existsSync('/usr/bin/ffmpeg') || succeeds('ffmpeg', ['-version']);
 export const chromiumThere = () => existsSync('/usr/bin/chromium');
 
 /** How this user may call apt-get: as root, through sudo without a password, or not at all. */

@@ -131,7 +131,7 @@ async function upload<T>(
 async function media(deps: Deps, person: PersonEntity, key: string, captions: Spoken[]) {
   const has = (name: string) => existsSync(join(assets, name));
   const clip = has(`${key}.mp4`)
-    ? await upload(`${key}.mp4`, null, (f) => keepClip(deps, person, f))
+    ? await upload(`${key}.mp4`, null, (f) => keepClip(deps, person, f, true))
     : null;
   const cover = has(`${key}.webp`)
     ? await upload(`${key}.webp`, null, (f) => keepPhoto(deps, person, f))
@@ -273,7 +273,9 @@ export const command: Command = {
       }
       const storage = makeStorage(env);
       await storage.ensureBucket();
-      const jobs = { mail: () => Promise.resolve(), stop: () => Promise.resolve() };
+      // Letters are not sent; work on media is found by the server's sweep when it starts.
+      const nothing = () => Promise.resolve();
+      const jobs = { mail: nothing, send: nothing, work: nothing, stop: nothing };
       const deps: Deps = {
         env,
         db,

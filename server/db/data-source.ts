@@ -8,6 +8,7 @@ import { CommentEntity, CommentVersionEntity } from './entities/talk';
 import { People1764580000000 } from './migrations/1764580000000-people';
 import { Plans1764580100000 } from './migrations/1764580100000-plans';
 import { TalkAndOrder1764580200000 } from './migrations/1764580200000-talk-and-order';
+import { MediaWork1764581100000 } from './migrations/1764581100000-media-work';
 
 export const entities = [
   PersonEntity,
@@ -29,7 +30,12 @@ export const entities = [
   LogEntity,
   LogTextEntity,
 ];
-export const migrations = [People1764580000000, Plans1764580100000, TalkAndOrder1764580200000];
+export const migrations = [
+  People1764580000000,
+  Plans1764580100000,
+  TalkAndOrder1764580200000,
+  MediaWork1764581100000,
+];
 
 /** The database at an address; the schema changes by migrations only. */
 export function makeDataSource(url: string, poolSize = 10): DataSource {

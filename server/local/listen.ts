@@ -4,6 +4,7 @@ import pino from 'pino';
 import { createApp } from '../app';
 import { makeDataSource } from '../db/data-source';
 import { readEnv } from '../env';
+import { startMediaWork } from '../features/media/work';
 import { startJobs } from '../jobs/jobs';
 import { makeStorage } from '../storage/storage';
 import { type MailCatcher } from './mail-catcher';
@@ -35,7 +36,9 @@ async function application(
   const storage = makeStorage(env);
   await storage.ensureBucket();
   const jobs = await startJobs(env, log);
-  const app = createApp({ env, db, storage, jobs, log, now: () => new Date() });
+  const deps = { env, db, storage, jobs, log, now: () => new Date() };
+  const app = createApp(deps);
+  await startMediaWork(deps);
   const close = async () => {
     await jobs.stop();
     await db.destroy();

@@ -25,6 +25,10 @@ export interface Storage {
   /** Length in bytes; throws when there is no such file. */
   size(key: string): Promise<number>;
   get(key: string): Promise<Buffer>;
+  /** The bytes from `start` up to and with `end`. */
+  getRange(key: string, start: number, end: number): Promise<Buffer>;
+  /** The file as a stream; what is not read is not held in memory. */
+  read(key: string): Promise<Readable>;
   remove(key: string): Promise<void>;
   /** A signed address on the media origin that stays the same within a window of half an hour. */
   signedUrl(key: string, type: string, now: Date): Promise<string>;
@@ -79,6 +83,15 @@ export function makeStorage(env: Env): Storage {
     async get(Key) {
       const { Body } = await s3.send(new GetObjectCommand({ Bucket, Key }));
       return Buffer.from((await Body?.transformToByteArray()) ?? []);
+    },
+    async getRange(Key, start, end) {
+      const wanted = new GetObjectCommand({ Bucket, Key, Range: `bytes=${start}-${end}` });
+      const { Body } = await s3.send(wanted);
+      return Buffer.from((await Body?.transformToByteArray()) ?? []);
+    },
+    async read(Key) {
+      const { Body } = await s3.send(new GetObjectCommand({ Bucket, Key }));
+      return Body as Readable;
     },
     async remove(Key) {
       await s3.send(new DeleteObjectCommand({ Bucket, Key }));

@@ -1,4 +1,5 @@
 import { Column, CreateDateColumn, Entity, PrimaryColumn } from 'typeorm';
+import { type MediaState } from '../../../shared/api/media';
 
 /** A file, named by the sha256 of its stored bytes. */
 @Entity({ name: 'media' })
@@ -12,6 +13,15 @@ export class MediaEntity {
   @Column({ type: 'double precision', nullable: true }) duration!: number | null;
   /** Rendition name to its key in the store and its type. */
   @Column({ type: 'jsonb' }) renditions!: Record<string, { key: string; type: string }>;
+  /** How far the work on it is; `refused` and `failed` have a reason. */
+  @Column({ type: 'text', default: 'ready' }) state!: MediaState;
+  @Column({ type: 'text', nullable: true }) reason!: string | null;
+  /** Per cent of the work that goes on. */
+  @Column({ type: 'smallint', default: 0 }) progress!: number;
+  /** The file as it was uploaded; it is never shown, since it may say where it was made. */
+  @Column({ name: 'source_key', type: 'text', nullable: true }) sourceKey!: string | null;
+  /** Until then one process works on it; afterwards another may take it. */
+  @Column({ name: 'lease_until', type: 'timestamptz', nullable: true }) leaseUntil!: Date | null;
   @CreateDateColumn({ name: 'created_at', type: 'timestamptz' }) createdAt!: Date;
 }
 

@@ -7,6 +7,7 @@ import { type createDraft, type publishPlan } from '../../../shared/api/plans';
 import { type BodyOf } from '../../../shared/api/contract';
 import { mediaOf, nextLetter, planFacts, planWords } from '../../../shared/plan/facts';
 import { emptyPlan, type PlanDocument } from '../../../shared/plan/document';
+import { queueStretches } from '../media/work/queues';
 import { readDocument } from '../../../shared/plan/upgrade';
 import { checkSheet } from '../../../shared/plan/sheet';
 import { type PersonEntity } from '../../db/entities/person';
@@ -242,6 +243,7 @@ export async function publishDraft(
     plan.state = 'published';
     await manager.getRepository(PlanEntity).save(plan);
     await deriveCard(manager, planId, document);
+    await queueStretches(deps, document, manager);
     return { plan, revision };
   });
 }

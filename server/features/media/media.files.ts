@@ -4,9 +4,14 @@ import { type PersonEntity } from '../../db/entities/person';
 import { type Deps } from '../../deps';
 import { missing } from '../../http/errors';
 import { isModerator, personOf } from '../../http/person';
+import { photoForm, photoSizes } from './photo-sizes';
 
 /** Its owner, everybody for what a published plan shows, holders of a bench copy, moderators. */
-async function maySee(deps: Deps, hash: string, person: PersonEntity | null): Promise<boolean> {
+export async function maySee(
+  deps: Deps,
+  hash: string,
+  person: PersonEntity | null,
+): Promise<boolean> {
   if (isModerator(person)) return true;
   const rows: unknown[] = await deps.db.query(
     `SELECT 1 FROM media_uses u JOIN plans p ON p.id = u.plan_id WHERE u.hash = $1
@@ -15,6 +20,18 @@ async function maySee(deps: Deps, hash: string, person: PersonEntity | null): Pr
     [hash, person?.id ?? null],
   );
   return rows.length > 0;
+}
+
+/** What answers a name: small and large stand in for each other while the work goes on, photos by what is accepted. */
+function formOf(media: MediaEntity, rendition: string, accept: string | undefined) {
+  const there = new Set(Object.keys(media.renditions));
+  if (media.kind === 'photo' && rendition in photoSizes)
+    return media.renditions[photoForm(rendition, accept, there)] ?? media.renditions.large;
+  const films = ['720', '360', 'original'];
+  const wanted =
+    media.kind === 'clip' && films.includes(rendition) ? [rendition, ...films] : [rendition];
+  const name = wanted.find((each) => there.has(each));
+  return name === undefined ? undefined : media.renditions[name];
 }
 
 /**
@@ -28,13 +45,16 @@ export function registerMediaFiles(app: Express, deps: Deps): void {
     const media = /^[0-9a-f]{64}$/.test(hash)
       ? await deps.db.getRepository(MediaEntity).findOneBy({ hash })
       : null;
-    const file = media?.renditions[rendition];
+    const file = media ? formOf(media, rendition, req.get('accept')) : undefined;
     if (!media || !file || !(await maySee(deps, hash, personOf(req))))
       throw missing('That picture or clip');
-    res.set('Cache-Control', 'private, max-age=900');
+    res.set('Cache-Control', 'private, max-age=900').vary('Accept');
     if (req.method === 'HEAD') {
       const bytes = await deps.storage.size(file.key);
-      res.type(file.type).set('Content-Length', String(bytes)).end();
+      res
+        .type(file.type)
+        .set({ 'Content-Length': String(bytes), 'Accept-Ranges': 'bytes' })
+        .end();
       return;
     }
     res.redirect(302, await deps.storage.signedUrl(file.key, file.type, deps.now()));

@@ -4,34 +4,26 @@ import { join } from 'node:path';
 import { type RequestHandler, type Router } from 'express';
 import multer, { MulterError } from 'multer';
 import {
+  getMedia,
+  getRenditions,
   listMedia,
   uploadCaptions,
   uploadClip,
   uploadPhoto,
-  type Media,
+  workAgain,
 } from '../../../shared/api/media';
 import { type UploadSpec } from '../../../shared/api/contract';
-import { type MediaEntity } from '../../db/entities/media';
+import { MediaEntity } from '../../db/entities/media';
 import { type PersonEntity } from '../../db/entities/person';
 import { type Deps } from '../../deps';
-import { ApiError } from '../../http/errors';
+import { ApiError, missing } from '../../http/errors';
 import { route, signedIn } from '../../http/route';
+import { maySee } from './media.files';
+import { presentMedia } from './media.presenter';
+import { ownFile, ownFiles, workOnAgain } from './media.repository';
 import { keepCaptions, keepClip, keepPhoto, type Arrived } from './media.service';
 
 const folder = join(tmpdir(), 'scantling-uploads');
-
-const presentMedia = (m: MediaEntity, name: string): Media => ({
-  hash: m.hash,
-  kind: m.kind,
-  bytes: Number(m.bytes),
-  type: m.type,
-  name,
-  width: m.width,
-  height: m.height,
-  duration: m.duration,
-  renditions: Object.keys(m.renditions),
-  createdAt: m.createdAt.toISOString(),
-});
 
 /** Takes one file to disk, and takes it away again when the request is over. */
 function receive(spec: UploadSpec): RequestHandler {
@@ -89,13 +81,23 @@ export function registerMedia(router: Router, deps: Deps): void {
   mount(uploadClip, keepClip);
   mount(uploadCaptions, keepCaptions);
   route(router, deps, listMedia, async ({ person }) => {
-    const rows: (MediaEntity & { name: string; owned_at: Date; created_at: Date })[] =
-      await deps.db.query(
-        `SELECT m.*, o.name FROM media_owners o JOIN media m ON m.hash = o.hash WHERE o.person_id = $1 ORDER BY o.created_at DESC LIMIT 200`,
-        [signedIn(person).id],
-      );
-    return {
-      items: rows.map((row) => presentMedia({ ...row, createdAt: row.created_at }, row.name)),
-    };
+    const files = await ownFiles(deps, signedIn(person));
+    return { items: files.map(({ media, name }) => presentMedia(media, name)) };
+  });
+  route(router, deps, getMedia, async ({ person, params }) => {
+    const { media, name } = await ownFile(deps, signedIn(person), params.hash);
+    return { media: presentMedia(media, name) };
+  });
+  route(router, deps, getRenditions, async ({ person, params: { hash } }) => {
+    const media = (await maySee(deps, hash, person))
+      ? await deps.db.getRepository(MediaEntity).findOneBy({ hash })
+      : null;
+    if (!media) throw missing('That picture or clip');
+    return { renditions: Object.keys(media.renditions) };
+  });
+  route(router, deps, workAgain, async ({ person, params }) => {
+    await workOnAgain(deps, signedIn(person), params.hash);
+    const { media, name } = await ownFile(deps, signedIn(person), params.hash);
+    return { media: presentMedia(media, name) };
   });
 }

@@ -9,14 +9,14 @@ import { type PersonEntity } from '../../db/entities/person';
 import { type Deps } from '../../deps';
 import { ApiError } from '../../http/errors';
 import { clipTypes, contentType, mp4Duration, photoTypes } from './content';
+import { maxPixels, photoSizes } from './photo-sizes';
+import { queueWork } from './work/queues';
 
 /** A file as it arrived, in the temporary folder. */
 export interface Arrived {
   path: string;
   name: string;
 }
-
-const maxPixels = 100_000_000;
 
 async function hashFile(path: string): Promise<string> {
   const hash = createHash('sha256');
@@ -36,7 +36,7 @@ async function requireSize(file: Arrived): Promise<number> {
   return size;
 }
 
-type New = Omit<MediaEntity, 'createdAt'>;
+type New = Omit<MediaEntity, 'createdAt' | 'leaseUntil' | 'progress' | 'reason'>;
 
 /** Keeps the row and its owner; an identical file is stored once. */
 async function keep(
@@ -53,6 +53,8 @@ async function keep(
       .values(media)
       .orIgnore()
       .execute();
+    const stored = await manager.getRepository(MediaEntity).findOneByOrFail({ hash: media.hash });
+    if (stored.state === 'waiting') await queueWork(deps, stored, manager);
     await manager
       .createQueryBuilder()
       .insert()
@@ -60,14 +62,16 @@ async function keep(
       .values({ hash: media.hash, personId: person.id, name: name.slice(0, 200) })
       .orIgnore()
       .execute();
-    return manager.getRepository(MediaEntity).findOneByOrFail({ hash: media.hash });
+    return stored;
   });
 }
 
+/** Keeps a clip and queues the work on it. `asShown`: it is already as it is to be shown (the demo's own drawings). */
 export async function keepClip(
   deps: Deps,
   person: PersonEntity,
   file: Arrived,
+  asShown = false,
 ): Promise<MediaEntity> {
   const bytes = await requireSize(file);
   const type = await contentType(file.path);
@@ -85,7 +89,7 @@ export async function keepClip(
     );
   }
   const hash = await hashFile(file.path);
-  const key = `clip/${hash}`;
+  const key = asShown ? `clip/${hash}/720` : `source/${hash}`;
   if (!(await deps.storage.has(key)))
     await deps.storage.put(key, createReadStream(file.path), { type, bytes });
   return keep(
@@ -99,7 +103,10 @@ export async function keepClip(
       width: null,
       height: null,
       duration,
-      renditions: { original: { key, type } },
+      // Shown only when the work on it is done: the file itself may tell where it was made.
+      renditions: asShown ? { 720: { key, type }, 360: { key, type } } : {},
+      state: asShown ? 'ready' : 'waiting',
+      sourceKey: asShown ? null : key,
     },
     file.name,
   );
@@ -115,24 +122,39 @@ function scale(path: string, width: number) {
     .toBuffer({ resolveWithObject: true });
 }
 
-async function scaled(file: Arrived): Promise<{ large: Scaled; thumb: Scaled }> {
+async function scaled(file: Arrived): Promise<[string, Scaled][]> {
+  const sizes: [string, Scaled][] = [];
   try {
-    return { large: await scale(file.path, 1600), thumb: await scale(file.path, 480) };
+    for (const [name, width] of Object.entries(photoSizes))
+      sizes.push([name, await scale(file.path, width)]);
+    return sizes;
   } catch {
     throw new ApiError(
       'uploads/unreadable',
-      `“${file.name}” could not be read as a picture, or has more than 100 million points. Nothing was stored; save it again smaller and try once more.`,
+      `“${file.name}” could not be read as a picture; it may have been cut off on its way. Nothing was stored; save it again and try once more.`,
     );
   }
 }
 
-/** Turned upright, everything about place and device left out, in two sizes. */
+/** Refuses a picture that would not fit in memory, by what its first bytes say of it. */
+async function requireFewPixels(file: Arrived): Promise<void> {
+  const { width = 0, height = 0 } = await sharp(file.path, { limitInputPixels: false })
+    .metadata()
+    .catch(() => ({ width: 0, height: 0 }));
+  if (width * height > maxPixels)
+    throw new ApiError(
+      'uploads/unreadable',
+      `“${file.name}” is ${width} × ${height} points; 100 million in all is the most. Nothing was stored; save it smaller and try again.`,
+    );
+}
+
+/** Turned upright, everything about place and device left out, as WebP at once; the other formats follow. */
 export async function keepPhoto(
   deps: Deps,
   person: PersonEntity,
   file: Arrived,
 ): Promise<MediaEntity> {
-  await requireSize(file);
+  const size = await requireSize(file);
   const type = await contentType(file.path);
   if (!type || !(photoTypes as readonly string[]).includes(type)) {
     throw new ApiError(
@@ -140,16 +162,21 @@ export async function keepPhoto(
       `“${file.name}” is not a picture we can show, whatever its name says. Nothing was stored; take a JPEG, PNG or WebP file.`,
     );
   }
+  await requireFewPixels(file);
   const sizes = await scaled(file);
-  const hash = hashOf(sizes.large.data);
+  const { info, data } = sizes[0]![1];
+  const hash = hashOf(data);
   const renditions: New['renditions'] = {};
-  for (const [name, { data }] of Object.entries(sizes)) {
+  for (const [name, { data: picture }] of sizes) {
     const key = `photo/${hash}/${name}`;
     if (!(await deps.storage.has(key)))
-      await deps.storage.put(key, data, { type: 'image/webp', bytes: data.length });
+      await deps.storage.put(key, picture, { type: 'image/webp', bytes: picture.length });
     renditions[name] = { key, type: 'image/webp' };
   }
-  const { info, data } = sizes.large;
+  // Kept out of reach until the other formats are made of it, then removed.
+  const sourceKey = `source/photo-${hash}`;
+  if (!(await deps.storage.has(`photo/${hash}/large.jpeg`)))
+    await deps.storage.put(sourceKey, createReadStream(file.path), { type, bytes: size });
   const row: New = {
     hash,
     kind: 'photo',
@@ -159,6 +186,8 @@ export async function keepPhoto(
     height: info.height,
     duration: null,
     renditions,
+    state: 'waiting',
+    sourceKey,
   };
   return keep(deps, person, row, file.name);
 }
@@ -197,6 +226,8 @@ export async function keepCaptions(
       height: null,
       duration,
       renditions: { original: { key, type } },
+      state: 'ready',
+      sourceKey: null,
     },
     file.name,
   );

@@ -9,6 +9,7 @@ import { PersonEntity } from '../../../server/db/entities/person';
 import { type Deps } from '../../../server/deps';
 import { readEnv } from '../../../server/env';
 import { hashPassword } from '../../../server/features/accounts/passwords';
+import { startMediaWork } from '../../../server/features/media/work';
 import { startJobs } from '../../../server/jobs/jobs';
 import { databaseUrl, startMailCatcher, templateName, type MailCatcher } from './services';
 import { makeStorage } from '../../../server/storage/storage';
@@ -27,7 +28,7 @@ export interface TestApp {
 }
 
 /** The real application on services of its own: PostgreSQL, object store, mail. */
-export async function testApp({ rateFactor = 10_000 } = {}): Promise<TestApp> {
+export async function testApp({ rateFactor = 10_000, mediaWork = false } = {}): Promise<TestApp> {
   const shared = process.env.SCANTLING_TEST_DATABASE;
   const store = process.env.SCANTLING_TEST_STORE;
   if (!shared || !store) throw new Error('API tests run as a Jest project: npm run test:api');
@@ -51,6 +52,7 @@ export async function testApp({ rateFactor = 10_000 } = {}): Promise<TestApp> {
   const jobs = await startJobs(env, log);
   const deps: Deps = { env, db, storage, jobs, log, now: () => new Date() };
   const app = createApp(deps);
+  if (mediaWork) await startMediaWork(deps);
   const passwordHash = await hashPassword(password);
   const agent = () => request.agent(app).set('X-Scantling', '1');
   return {
