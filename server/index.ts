@@ -3,7 +3,7 @@ import pino from 'pino';
 import { createApp } from './app';
 import { makeDataSource } from './db/data-source';
 import { readEnv, type Env } from './env';
-import { startMediaWork } from './features/media/work';
+import { startWork } from './features/work';
 import { startJobs } from './jobs/jobs';
 import { makeStorage } from './storage/storage';
 
@@ -16,7 +16,7 @@ async function serve(env: Env): Promise<void> {
   const jobs = await startJobs(env, log);
   const deps = { env, db, storage, jobs, log, now: () => new Date() };
   const app = createApp(deps);
-  await startMediaWork(deps);
+  await startWork(deps);
   const server = createServer(app);
   server.once('error', (error: NodeJS.ErrnoException) => {
     const taken = error.code === 'EADDRINUSE';

@@ -33,6 +33,7 @@ export const keys = {
   person: (handle: string) => ['person', handle] as const,
   people: (q: string) => ['people', q] as const,
   captions: (hash: string) => ['captions', hash] as const,
+  uploads: ['uploads'] as const,
   ownMedia: (hash: string) => ['own-media', hash] as const,
 };
 

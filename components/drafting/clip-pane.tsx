@@ -1,6 +1,6 @@
-import { useState } from 'react';
+import { useCallback, useState } from 'react';
 import { v7 as uuid } from 'uuid';
-import { uploadCaptions, uploadClip } from '../../shared/api/media';
+import { uploadCaptions } from '../../shared/api/media';
 import { limits } from '../../shared/api/limits';
 import { jot, readCaptions, toDraft } from '../../shared/captions';
 import { Rational } from '../../shared/measure';
@@ -9,6 +9,7 @@ import { clockTime } from '../../shared/plan/stick/spoken';
 import { upload } from '../data/api-client';
 import { tell } from '../data/problems';
 import { ClipPlayer } from '../plans/clip-player';
+import { ClipUpload, type ArrivedClip } from '../uploads/clip-upload';
 import { MediaLine } from '../uploads/media-line';
 import { useOwnMedia } from '../uploads/media-queries';
 import { Banner } from '../ui/banner';
@@ -16,7 +17,6 @@ import { Button } from '../ui/button';
 import { FilePick } from '../ui/file-pick';
 import { Heading } from '../ui/heading';
 import { Row, Section, Stack } from '../ui/layout';
-import { Progress } from '../ui/progress';
 import { Text } from '../ui/text';
 import { TextField } from '../ui/text-field';
 import { type ClipPlace } from './clip-place';
@@ -53,53 +53,11 @@ export function stepsFromCaptions(text: string): PlanDocument['steps'] {
     );
 }
 
-/** How long a clip plays, as this browser reads it; null when it cannot. */
-export function clipSeconds(file: File): Promise<number | null> {
-  return new Promise((resolve) => {
-    const video = window.document.createElement('video');
-    const url = URL.createObjectURL(file);
-    const done = (seconds: number | null) => {
-      URL.revokeObjectURL(url);
-      resolve(seconds);
-    };
-    video.preload = 'metadata';
-    video.onloadedmetadata = () => done(Number.isFinite(video.duration) ? video.duration : null);
-    video.onerror = () => done(null);
-    video.src = url;
-  });
-}
-
-/** Brings clip and caption files into the draft. */
-function useClipFiles({ document, change }: Pick<DraftEditor, 'document' | 'change'>) {
-  const [progress, setProgress] = useState<number | null>(null);
+/** Brings caption files into the draft. */
+function useCaptionFile({ document, change }: Pick<DraftEditor, 'document' | 'change'>) {
   const [trouble, setTrouble] = useState<string | null>(null);
   const [found, setFound] = useState<string | null>(null);
   const { clip } = document;
-  const bringClip = async (file: File | undefined) => {
-    if (!file) return;
-    setTrouble(null);
-    setProgress(0);
-    try {
-      const played = await clipSeconds(file);
-      const { media } = await upload(uploadClip, file, {
-        onProgress: (sent, total) => setProgress(sent / total),
-      });
-      const captions = clip.source === 'none' ? undefined : clip.captions;
-      change((d) => ({
-        ...d,
-        clip: {
-          source: 'upload',
-          media: media.hash,
-          duration: media.duration ?? played ?? 0,
-          ...(captions ? { captions } : {}),
-        },
-      }));
-    } catch (error) {
-      setTrouble(tell(error).text);
-    } finally {
-      setProgress(null);
-    }
-  };
   const bringCaptions = async (file: File | undefined) => {
     if (!file) return;
     setTrouble(null);
@@ -126,7 +84,7 @@ function useClipFiles({ document, change }: Pick<DraftEditor, 'document' | 'chan
       setTrouble(tell(error).text);
     }
   };
-  return { progress, trouble, found, bringClip, bringCaptions };
+  return { trouble, found, bringCaptions };
 }
 
 /** The clip once it can play; until then how far it is. */
@@ -153,7 +111,19 @@ export function ClipPane({
   place: ClipPlace;
 }) {
   const { clip } = document;
-  const { progress, trouble, found, bringClip, bringCaptions } = useClipFiles({ document, change });
+  const { trouble, found, bringCaptions } = useCaptionFile({ document, change });
+  const takeClip = useCallback(
+    ({ hash, duration }: ArrivedClip) =>
+      change((d) => {
+        const captions = d.clip.source === 'none' ? undefined : d.clip.captions;
+        const kept = captions ? { captions } : {};
+        return {
+          ...d,
+          clip: { source: 'upload', media: hash, duration: duration ?? 0, ...kept },
+        };
+      }),
+    [change],
+  );
   return (
     <Section>
       <Heading level={2}>Clip</Heading>
@@ -173,15 +143,11 @@ export function ClipPane({
           {clockTime(place.now)} of {clockTime(clip.duration)}
         </Text>
       )}
-      {progress === null ? null : (
-        <Progress label={`Uploading, ${Math.round(progress * 100)} per cent`} value={progress} />
-      )}
       <Row gap={16} wrap align="flex-start">
-        <FilePick
-          label="Clip file"
-          accept="video/*"
-          maxBytes={limits.clipBytes}
-          onFiles={(files) => void bringClip(files[0])}
+        <ClipUpload
+          planId={document.id}
+          hash={clip.source === 'upload' ? clip.media : undefined}
+          onArrived={takeClip}
         />
         <FilePick
           label="Caption file"

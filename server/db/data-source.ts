@@ -2,6 +2,7 @@ import { DataSource } from 'typeorm';
 import { BenchCopyEntity, BenchEntryEntity, ShopCardEntity } from './entities/bench';
 import { CaseEntity, LogEntity, LogTextEntity, ReportEntity, RulingEntity } from './entities/cases';
 import { MediaEntity, MediaOwnerEntity, MediaUseEntity } from './entities/media';
+import { UploadEntity, UploadPartEntity } from './entities/upload';
 import { EmailTokenEntity, PersonEntity } from './entities/person';
 import { PlanCardEntity, PlanEntity, RevisionEntity } from './entities/plan';
 import { CommentEntity, CommentVersionEntity } from './entities/talk';
@@ -9,6 +10,7 @@ import { People1764580000000 } from './migrations/1764580000000-people';
 import { Plans1764580100000 } from './migrations/1764580100000-plans';
 import { TalkAndOrder1764580200000 } from './migrations/1764580200000-talk-and-order';
 import { MediaWork1764581100000 } from './migrations/1764581100000-media-work';
+import { Uploads1764581200000 } from './migrations/1764581200000-uploads';
 
 export const entities = [
   PersonEntity,
@@ -19,6 +21,8 @@ export const entities = [
   MediaEntity,
   MediaOwnerEntity,
   MediaUseEntity,
+  UploadEntity,
+  UploadPartEntity,
   BenchCopyEntity,
   BenchEntryEntity,
   ShopCardEntity,
@@ -35,6 +39,7 @@ export const migrations = [
   Plans1764580100000,
   TalkAndOrder1764580200000,
   MediaWork1764581100000,
+  Uploads1764581200000,
 ];
 
 /** The database at an address; the schema changes by migrations only. */

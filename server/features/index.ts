@@ -8,6 +8,7 @@ import { registerMedia } from './media/media.routes';
 import { registerPeople } from './people/people.routes';
 import { registerPlans } from './plans/plans.routes';
 import { registerTalk } from './talk/talk.routes';
+import { registerUploads } from './uploads/uploads.routes';
 
 /** Mounts every feature's routes below /api. */
 export function registerFeatures(router: Router, deps: Deps): void {
@@ -16,6 +17,7 @@ export function registerFeatures(router: Router, deps: Deps): void {
     registerPlans,
     registerDrafts,
     registerMedia,
+    registerUploads,
     registerBench,
     registerTalk,
     registerCases,

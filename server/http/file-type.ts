@@ -3,3 +3,9 @@ export async function fromFile(path: string): Promise<{ mime: string } | undefin
   const { fileTypeFromFile } = await import('file-type');
   return fileTypeFromFile(path);
 }
+
+/** The same by a file's first bytes. */
+export async function fromBuffer(head: Uint8Array): Promise<{ mime: string } | undefined> {
+  const { fileTypeFromBuffer } = await import('file-type');
+  return fileTypeFromBuffer(head);
+}

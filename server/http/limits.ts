@@ -13,6 +13,7 @@ export const rates: Record<Name, { points: number; duration: number }> = {
   mail: { points: 5, duration: 900 },
   write: { points: 240, duration: 60 },
   upload: { points: 60, duration: 600 },
+  part: { points: 3000, duration: 600 },
   report: { points: 20, duration: 3600 },
   read: { points: 1200, duration: 60 },
 };

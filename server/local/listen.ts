@@ -4,7 +4,7 @@ import pino from 'pino';
 import { createApp } from '../app';
 import { makeDataSource } from '../db/data-source';
 import { readEnv } from '../env';
-import { startMediaWork } from '../features/media/work';
+import { startWork } from '../features/work';
 import { startJobs } from '../jobs/jobs';
 import { makeStorage } from '../storage/storage';
 import { type MailCatcher } from './mail-catcher';
@@ -38,7 +38,7 @@ async function application(
   const jobs = await startJobs(env, log);
   const deps = { env, db, storage, jobs, log, now: () => new Date() };
   const app = createApp(deps);
-  await startMediaWork(deps);
+  await startWork(deps);
   const close = async () => {
     await jobs.stop();
     await db.destroy();

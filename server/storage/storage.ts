@@ -1,11 +1,15 @@
 import {
+  AbortMultipartUploadCommand,
+  CompleteMultipartUploadCommand,
   CreateBucketCommand,
+  CreateMultipartUploadCommand,
   DeleteObjectCommand,
   GetObjectCommand,
   HeadBucketCommand,
   HeadObjectCommand,
   PutObjectCommand,
   S3Client,
+  UploadPartCommand,
 } from '@aws-sdk/client-s3';
 import { getSignedUrl } from '@aws-sdk/s3-request-presigner';
 import { type Readable } from 'node:stream';
@@ -30,6 +34,16 @@ export interface Storage {
   /** The file as a stream; what is not read is not held in memory. */
   read(key: string): Promise<Readable>;
   remove(key: string): Promise<void>;
+  /** Begins a file that comes in parts; returns the store's id for it. */
+  startParts(key: string, type: string): Promise<string>;
+  /** An address on the media origin to PUT one part to, good for `seconds`. */
+  partUrl(key: string, id: string, number: number, seconds: number): Promise<string>;
+  /** Puts the parts together. */
+  joinParts(key: string, id: string, parts: { number: number; etag: string }[]): Promise<void>;
+  /** Gives the parts up. False when the store cannot (the local one). */
+  dropParts(key: string, id: string): Promise<boolean>;
+  /** A signed address for our own tools. */
+  insideUrl(key: string): Promise<string>;
   /** A signed address on the media origin that stays the same within a window of half an hour. */
   signedUrl(key: string, type: string, now: Date): Promise<string>;
 }
@@ -45,6 +59,37 @@ function client(env: Env, endpoint: string): S3Client {
     requestChecksumCalculation: 'WHEN_REQUIRED',
     responseChecksumValidation: 'WHEN_REQUIRED',
   });
+}
+
+type Parts = Pick<Storage, 'startParts' | 'partUrl' | 'joinParts' | 'dropParts'>;
+
+/** Files that come in parts, straight from browsers. */
+function parts(s3: S3Client, outside: S3Client, Bucket: string): Parts {
+  return {
+    async startParts(Key, ContentType) {
+      const command = new CreateMultipartUploadCommand({ Bucket, Key, ContentType });
+      const { UploadId } = await s3.send(command);
+      if (!UploadId) throw new Error('the store gave no id for a file in parts');
+      return UploadId;
+    },
+    partUrl(Key, UploadId, PartNumber, expiresIn) {
+      const command = new UploadPartCommand({ Bucket, Key, UploadId, PartNumber });
+      return getSignedUrl(outside, command, { expiresIn });
+    },
+    async joinParts(Key, UploadId, list) {
+      const Parts = list.map(({ number, etag }) => ({ PartNumber: number, ETag: etag }));
+      const MultipartUpload = { Parts };
+      await s3.send(new CompleteMultipartUploadCommand({ Bucket, Key, UploadId, MultipartUpload }));
+    },
+    async dropParts(Key, UploadId) {
+      try {
+        await s3.send(new AbortMultipartUploadCommand({ Bucket, Key, UploadId }));
+        return true;
+      } catch {
+        return false;
+      }
+    },
+  };
 }
 
 /** A store on any S3-compatible service. */
@@ -95,6 +140,10 @@ export function makeStorage(env: Env): Storage {
     },
     async remove(Key) {
       await s3.send(new DeleteObjectCommand({ Bucket, Key }));
+    },
+    ...parts(s3, outside, Bucket),
+    insideUrl(Key) {
+      return getSignedUrl(s3, new GetObjectCommand({ Bucket, Key }), { expiresIn: 3600 });
     },
     signedUrl(Key, type, now) {
       const signingDate = new Date(Math.floor(now.getTime() / windowMs) * windowMs);

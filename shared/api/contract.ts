@@ -38,7 +38,7 @@ export interface Contract<
   status?: 200 | 201 | 204;
   response?: R;
   /** Name of the rate limit that applies (see the server's table); reads are limited generally. */
-  limit?: 'sign-in' | 'mail' | 'write' | 'upload' | 'report';
+  limit?: 'sign-in' | 'mail' | 'write' | 'upload' | 'part' | 'report';
 }
 
 /** Keeps the literal types of a contract while checking its shape. */

@@ -23,7 +23,13 @@ export const limits = {
   draftBytes: 8 * 1024 * 1024,
   captionBytes: 4 * 1024 * 1024,
   photoBytes: 20 * 1024 * 1024,
-  clipBytes: 200 * 1024 * 1024,
+  /** In parts; `wholeClipBytes` in one request. */
+  clipBytes: 4 * 1024 * 1024 * 1024,
+  wholeClipBytes: 200 * 1024 * 1024,
+  /** Files of one person in all, by what they arrived with. */
+  creatorBytes: 40 * 1024 * 1024 * 1024,
+  viewerBytes: 2 * 1024 * 1024 * 1024,
+  fileName: 200,
   entriesPerCopy: 20_000,
   pageSize: 24,
   pageSizeMax: 100,

@@ -63,8 +63,8 @@ export const uploadClip = contract({
   access: 'creator',
   limit: 'upload',
   status: 201,
-  summary: 'A clip up to 200 MB (MP4, WebM, QuickTime): checked by its content, stored by hash.',
-  upload: { field: 'file', maxBytes: limits.clipBytes },
+  summary: 'A clip up to 200 MB in one request (MP4, WebM, QuickTime); larger ones go in parts.',
+  upload: { field: 'file', maxBytes: limits.wholeClipBytes },
   response: uploadResponse,
 });
 export const uploadCaptions = contract({

@@ -9,6 +9,7 @@ import { type PersonEntity } from '../../db/entities/person';
 import { type Deps } from '../../deps';
 import { ApiError } from '../../http/errors';
 import { clipTypes, contentType, mp4Duration, photoTypes } from './content';
+import { requireRoom } from './quota';
 import { maxPixels, photoSizes } from './photo-sizes';
 import { queueWork } from './work/queues';
 
@@ -74,6 +75,7 @@ export async function keepClip(
   asShown = false,
 ): Promise<MediaEntity> {
   const bytes = await requireSize(file);
+  await requireRoom(deps, person, bytes, file.name);
   const type = await contentType(file.path);
   if (!type || !(clipTypes as readonly string[]).includes(type)) {
     throw new ApiError(
@@ -155,6 +157,7 @@ export async function keepPhoto(
   file: Arrived,
 ): Promise<MediaEntity> {
   const size = await requireSize(file);
+  await requireRoom(deps, person, size, file.name);
   const type = await contentType(file.path);
   if (!type || !(photoTypes as readonly string[]).includes(type)) {
     throw new ApiError(

@@ -109,3 +109,18 @@ function crc32(bytes: Buffer): number {
   }
   return (crc ^ 0xffffffff) >>> 0;
 }
+
+/** A clip made longer to so many bytes by a `free` box behind it (ISO/IEC 14496-12 §8.1.2), filled by a seed. */
+export function padded(clip: Buffer, bytes: number): Buffer {
+  const box = Buffer.alloc(bytes - clip.length);
+  let x = 2463534242;
+  for (let i = 8; i < box.length; i += 4096) {
+    x ^= x << 13;
+    x ^= x >>> 17;
+    x ^= x << 5;
+    box.writeUInt32LE(x >>> 0, Math.min(i, box.length - 4));
+  }
+  box.writeUInt32BE(box.length, 0);
+  box.write('free', 4, 'latin1');
+  return Buffer.concat([clip, box]);
+}

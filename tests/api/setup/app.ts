@@ -9,7 +9,7 @@ import { PersonEntity } from '../../../server/db/entities/person';
 import { type Deps } from '../../../server/deps';
 import { readEnv } from '../../../server/env';
 import { hashPassword } from '../../../server/features/accounts/passwords';
-import { startMediaWork } from '../../../server/features/media/work';
+import { startWork } from '../../../server/features/work';
 import { startJobs } from '../../../server/jobs/jobs';
 import { databaseUrl, startMailCatcher, templateName, type MailCatcher } from './services';
 import { makeStorage } from '../../../server/storage/storage';
@@ -52,7 +52,7 @@ export async function testApp({ rateFactor = 10_000, mediaWork = false } = {}): 
   const jobs = await startJobs(env, log);
   const deps: Deps = { env, db, storage, jobs, log, now: () => new Date() };
   const app = createApp(deps);
-  if (mediaWork) await startMediaWork(deps);
+  if (mediaWork) await startWork(deps);
   const passwordHash = await hashPassword(password);
   const agent = () => request.agent(app).set('X-Scantling', '1');
   return {

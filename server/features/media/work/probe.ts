@@ -46,10 +46,10 @@ const readers: Record<string, string> = {
   'video/matroska': 'matroska',
 };
 
-/** Arguments that make ffmpeg read a local file of a known type as just that. */
+/** Arguments that make ffmpeg read a local file, or one of our own signed addresses, as just its type. */
 export const readAs = (type: string, path: string): string[] => [
   '-protocol_whitelist',
-  'file',
+  /^https?:/.test(path) ? 'http,https,tcp,tls' : 'file',
   '-f',
   readers[type] ?? 'mov',
   '-i',
