@@ -61,6 +61,26 @@ function client(env: Env, endpoint: string): S3Client {
   });
 }
 
+type Reading = Pick<Storage, 'get' | 'getRange' | 'read'>;
+
+function reading(s3: S3Client, Bucket: string): Reading {
+  return {
+    async get(Key) {
+      const { Body } = await s3.send(new GetObjectCommand({ Bucket, Key }));
+      return Buffer.from((await Body?.transformToByteArray()) ?? []);
+    },
+    async getRange(Key, start, end) {
+      const wanted = new GetObjectCommand({ Bucket, Key, Range: `bytes=${start}-${end}` });
+      const { Body } = await s3.send(wanted);
+      return Buffer.from((await Body?.transformToByteArray()) ?? []);
+    },
+    async read(Key) {
+      const { Body } = await s3.send(new GetObjectCommand({ Bucket, Key }));
+      return Body as Readable;
+    },
+  };
+}
+
 type Parts = Pick<Storage, 'startParts' | 'partUrl' | 'joinParts' | 'dropParts'>;
 
 /** Files that come in parts, straight from browsers. */
@@ -125,19 +145,7 @@ export function makeStorage(env: Env): Storage {
     async size(Key) {
       return (await s3.send(new HeadObjectCommand({ Bucket, Key }))).ContentLength ?? 0;
     },
-    async get(Key) {
-      const { Body } = await s3.send(new GetObjectCommand({ Bucket, Key }));
-      return Buffer.from((await Body?.transformToByteArray()) ?? []);
-    },
-    async getRange(Key, start, end) {
-      const wanted = new GetObjectCommand({ Bucket, Key, Range: `bytes=${start}-${end}` });
-      const { Body } = await s3.send(wanted);
-      return Buffer.from((await Body?.transformToByteArray()) ?? []);
-    },
-    async read(Key) {
-      const { Body } = await s3.send(new GetObjectCommand({ Bucket, Key }));
-      return Body as Readable;
-    },
+    ...reading(s3, Bucket),
     async remove(Key) {
       await s3.send(new DeleteObjectCommand({ Bucket, Key }));
     },

@@ -60,7 +60,8 @@ describe('a large clip goes straight to the store', () => {
     'over five cut lines, a reload, a killed server and a pause, byte for byte, and the server stays small',
     async () => {
       const browser = await launchBrowser();
-      const { page, close } = await openPage(browser, stage.base, { width: 1280, as: odalys });
+      const opened = await openPage(browser, stage.base, { width: 1280, as: odalys });
+      const { page } = opened;
       page.setDefaultTimeout(limit);
       try {
         await page.goto('/drafting');
@@ -130,7 +131,7 @@ describe('a large clip goes straight to the store', () => {
         );
         expect(Math.max(most - before, mostAgain - again)).toBeLessThan(100);
       } finally {
-        await close();
+        await opened.close();
         await browser.close();
       }
     },
