@@ -1,9 +1,5 @@
 /** Lumber arithmetic; sizes in inches where the trade counts in inches. */
 
-/** Board feet by the exact nominal size: T · W · L / 144, all inches; under 1 in thick counts as 1 in (from memory). */
-export const boardFeet = (thickness: number, width: number, length: number): number =>
-  (Math.max(1, thickness) * width * length) / 144;
-
 const near = 1e-9;
 
 export interface Tally {

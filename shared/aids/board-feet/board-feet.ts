@@ -1,5 +1,6 @@
 import { z } from 'zod';
-import { boardFeet, tally } from '../../trade/lumber';
+import { boardFeet } from '../../layout/buying/board-feet';
+import { tally } from '../../trade/lumber';
 import { refused, type Outcome } from '../outcome';
 
 const inch = 25.4;
@@ -48,7 +49,7 @@ export function workBoardFeet(input: z.output<typeof boardFeetInput>): Outcome<B
     const [t, w, l] = [thickness / inch, width / inch, length / inch];
     const one = tally(t, w, l);
     return {
-      exact: count * boardFeet(t, w, l),
+      exact: count * boardFeet(t, w, l / 12),
       tally: count * one.boardFeet,
       surface: one.surface,
       onTheHalf: one.onTheHalf,

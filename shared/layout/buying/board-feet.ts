@@ -1,4 +1,4 @@
-import { dressedThickness, dressedWidth } from '../../trade/lumber.data';
+import { softwoodThickness, softwoodWidth, type Dressed } from '../../trade/lumber.data';
 
 const inch = 25.4;
 /** Cubic millimetres in a board foot: 144 cubic inches. */
@@ -17,9 +17,10 @@ export const tallyBoardFeet = (thicknessIn: number, widthIn: number, lengthFt: n
 
 /** The nominal inches of a dressed softwood board (PS 20, dry), or null when it is none of the standard's. */
 export function nominalOf(thicknessMm: number, widthMm: number) {
-  const near = (table: readonly (readonly [number, number])[], mm: number) =>
-    table.find(([, dressed]) => Math.abs(dressed * inch - mm) <= 0.8)?.[0] ?? null;
-  const [thickness, width] = [near(dressedThickness, thicknessMm), near(dressedWidth, widthMm)];
+  const near = (table: readonly Dressed[], mm: number) =>
+    table.find(({ nominal, dry }) => nominal >= 1 && Math.abs(dry * inch - mm) <= 0.8)?.nominal ??
+    null;
+  const [thickness, width] = [near(softwoodThickness, thicknessMm), near(softwoodWidth, widthMm)];
   return thickness === null || width === null ? null : { thickness, width };
 }
 
