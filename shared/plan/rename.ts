@@ -1,6 +1,7 @@
 import { type PlanDocument } from './document';
 
-const expressionKeys = new Set([
+/** Fields of the document that hold an expression, by name. */
+export const expressionKeys: ReadonlySet<string> = new Set([
   'expression',
   'by',
   'plus',

@@ -6,7 +6,7 @@ import { elementId, exactLength, instruments, mediaHash } from '../document-valu
 const base = z.object({
   /** The client's UUIDv7. */
   id: elementId,
-  /** The step, dimension, check or wait it is about. */
+  /** The step, dimension, check or wait it is about; for `acknowledge` the correction or safety note. */
   elementId: elementId,
   revisionId: elementId,
   /** Opaque id of the browser, and its own running number. */
@@ -52,6 +52,8 @@ export const entrySchema = z.discriminatedUnion('kind', [
   base.extend({ kind: z.literal('wait-start'), startedAt: z.iso.datetime({ offset: true }) }),
   base.extend({ kind: z.literal('wait-end') }),
   base.extend({ kind: z.literal('choice'), groupId: elementId }),
+  /** Read and understood: a correction or a safety note, by its id. */
+  base.extend({ kind: z.literal('acknowledge') }),
   /** Takes an earlier entry back and puts nothing in its place. */
   base.extend({ kind: z.literal('withdraw'), withdraws: elementId }),
 ]);

@@ -26,6 +26,8 @@ export interface BenchState {
   waits: ReadonlyMap<string, { startedAt: string; ended: boolean }>;
   /** Chosen group per alternatives id. */
   choices: ReadonlyMap<string, string>;
+  /** Corrections and safety notes that were read, by id. */
+  acknowledged: ReadonlySet<string>;
 }
 
 /**
@@ -104,6 +106,7 @@ export function foldEntries(entries: readonly OrderedEntry[]): BenchState {
   const photos = new Map<string, Of<'photo'>[]>();
   const waits = new Map<string, { startedAt: string; ended: boolean }>();
   const choices = new Map<string, string>();
+  const acknowledged = new Set<string>();
   for (const e of ordered) {
     if (out.has(e.id)) continue;
     if (e.kind === 'tick') ticks.add(e.elementId);
@@ -118,6 +121,7 @@ export function foldEntries(entries: readonly OrderedEntry[]): BenchState {
       const wait = waits.get(e.elementId);
       if (wait) waits.set(e.elementId, { ...wait, ended: true });
     } else if (e.kind === 'choice') choices.set(e.elementId, e.groupId);
+    else if (e.kind === 'acknowledge') acknowledged.add(e.elementId);
   }
-  return { ticks, readings, trials, looks, notes, photos, waits, choices };
+  return { ticks, readings, trials, looks, notes, photos, waits, choices, acknowledged };
 }

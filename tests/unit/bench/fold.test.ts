@@ -42,6 +42,12 @@ describe('the fold of a bench copy', () => {
     ).toBe(true);
   });
 
+  it('keeps what was read and understood, until that is taken back', () => {
+    const read: Entry = { ...base(1, 70), kind: 'acknowledge' };
+    expect([...foldEntries(stored([read])).acknowledged]).toEqual([uuid(70)]);
+    expect(foldEntries(stored([read, withdraw(2, 1)])).acknowledged.size).toBe(0);
+  });
+
   it('puts withdrawal links before the order of arrival', () => {
     expect(foldEntries(stored([withdraw(2, 1), tick(1, 100)])).ticks.size).toBe(0);
   });
