@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { rimSpeed, smallestBlade } from '../../trade/saws';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 export const bladeSpeedInput = z.object({
@@ -60,3 +61,17 @@ export function workBladeSpeed(input: z.output<typeof bladeSpeedInput>): Outcome
     },
   };
 }
+
+/** The aid "Speed of a blade". */
+export const bladeSpeedAid = defineAid({
+  id: 'blade-speed',
+  title: 'Speed of a blade',
+  what: 'Speed of the teeth, and the machine against the greatest speed marked on the blade.',
+  sources:
+    'v = π D N/60, computed; never over the mark: WAC 296-78-70509(5); smallest blade 60 % of the largest: HSE, circular saw bench.',
+  caution:
+    'Never run a blade over its mark, or one without a mark. The machine’s manual decides which blades it takes.',
+  example: { diameter: 250, rpm: 4500, marked: 7000 },
+  input: bladeSpeedInput,
+  work: workBladeSpeed,
+});

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { boardFeet } from '../../layout/buying/board-feet';
 import { tally } from '../../trade/lumber';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 const inch = 25.4;
@@ -76,3 +77,15 @@ export function workBoardFeet(input: z.output<typeof boardFeetInput>): Outcome<B
     },
   };
 }
+
+/** The aid "Board feet". */
+export const boardFeetAid = defineAid({
+  id: 'board-feet',
+  title: 'Board feet',
+  what: 'Board feet of a pile, exact and as a hardwood yard tallies it.',
+  sources:
+    '1 board foot is 144 cubic inches of nominal size; under 1 in counts as 1 in and the whole-foot tally: PS 20 and NHLA, from memory.',
+  example: { boards: [{ thickness: 31.75, width: 177.8, length: 3048 }] },
+  input: boardFeetInput,
+  work: workBoardFeet,
+});

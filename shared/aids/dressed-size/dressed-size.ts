@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { hardwoodQuarters, softwoodThickness, softwoodWidth } from '../../trade/lumber.data';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 const inch = 25.4;
@@ -81,3 +82,15 @@ function hardwood(input: Extract<Input, { kind: 'hardwood' }>): Outcome<DressedS
 /** The least dressed size behind a nominal one: softwood by PS 20, hardwood by the NHLA rules. */
 export const workDressedSize = (input: Input): Outcome<DressedSizeResult> =>
   input.kind === 'softwood' ? softwood(input) : hardwood(input);
+
+/** The aid "Nominal to dressed". */
+export const dressedSizeAid = defineAid({
+  id: 'dressed-size',
+  title: 'Nominal to dressed',
+  what: 'What a nominal size measures at least, softwood and hardwood.',
+  sources:
+    'Softwood PS 20, hardwood NHLA rules, both by transcriptions; 10/4 from memory. Measure the board you have.',
+  example: { kind: 'softwood', thickness: 2, width: 4, state: 'dry' },
+  input: dressedSizeInput,
+  work: workDressedSize,
+});

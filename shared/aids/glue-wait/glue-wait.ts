@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { clampPressure, glueFamilies, type Span } from '../../trade/glue.data';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 const minutes = z.number().positive().max(20_160).optional();
@@ -85,3 +86,17 @@ export function workGlueWait(input: z.output<typeof glueWaitInput>): Outcome<Glu
     },
   };
 }
+
+/** The aid "Waits of glue". */
+export const glueWaitAid = defineAid({
+  id: 'glue-wait',
+  title: 'Waits of glue',
+  what: 'How long it stays open, in the clamps, and off its load.',
+  sources:
+    'Placeholders from makers’ guides and from memory until the label’s own figures stand there; clamp pressure read in a guide.',
+  caution:
+    'Read the label: skin, eyes, fresh air. Solvents and some hardeners want gloves and no flame.',
+  example: { family: 'pva-yellow', celsius: 20, label: {} },
+  input: glueWaitInput,
+  work: workGlueWait,
+});

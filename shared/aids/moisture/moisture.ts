@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { equilibriumMoisture, moistureDomain, moistureUncertainty } from '../../trade/moisture';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 export const moistureInput = z.object({
@@ -51,3 +52,15 @@ export function workMoisture(input: z.output<typeof moistureInput>): Outcome<Moi
     },
   };
 }
+
+/** The aid "Moisture content". */
+export const MoistureAid = defineAid({
+  id: 'moisture',
+  title: 'Moisture content',
+  what: 'The moisture wood comes to in a room, from temperature and humidity.',
+  sources:
+    'USDA Wood Handbook FPL-GTR-190, Eq. 4–5 and Table 4–2; good for ±1 % at best (FPL-GTR-229).',
+  example: { celsius: 20, humidity: 50 },
+  input: moistureInput,
+  work: workMoisture,
+});

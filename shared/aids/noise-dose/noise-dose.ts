@@ -7,6 +7,7 @@ import {
   permittedMinutes,
   timeWeightedAverage,
 } from '../../trade/noise';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 export const noiseDoseInput = z.object({
@@ -88,3 +89,22 @@ export function workNoiseDose(input: z.output<typeof noiseDoseInput>): Outcome<N
     },
   };
 }
+
+/** The aid "Noise of the day". */
+export const noiseDoseAid = defineAid({
+  id: 'noise-dose',
+  title: 'Noise of the day',
+  what: 'The day’s noise without ear protection, against a safe day.',
+  sources:
+    'NIOSH 98-126 (85 dBA, 3 dB) is the advice; OSHA 29 CFR 1910.95 (90 dBA, 5 dB) beside it. Meter ±2 dB and counting from 80 dBA from memory.',
+  caution:
+    'Hearing does not come back. Ears covered at 85 dBA and over; catch the dust of the same machines: NIOSH asks for 1 mg/m³ of wood dust or less.',
+  example: {
+    day: [
+      { name: 'planer', level: 100, minutes: 15 },
+      { name: 'table saw', level: 95, minutes: 40 },
+    ],
+  },
+  input: noiseDoseInput,
+  work: workNoiseDose,
+});

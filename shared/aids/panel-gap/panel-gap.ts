@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { movement } from '../../trade/movement';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 import { coefficientFor, linearShare, moistureRange, woodFields } from '../wood';
 
@@ -75,3 +76,23 @@ export function workPanelGap(input: z.output<typeof panelGapInput>): Outcome<Pan
     },
   };
 }
+
+/** The aid "Panel in a frame". */
+export const panelGapAid = defineAid({
+  id: 'panel-gap',
+  title: 'Panel in a frame',
+  what: 'How wide to cut a loose panel so that no season bursts or bares it.',
+  sources:
+    'USDA Wood Handbook FPL-GTR-190, Eq. 13–2 and Table 13–5; the share kept free is the rule’s own error.',
+  example: {
+    wood: 'cherry',
+    cut: 'flat',
+    opening: 400,
+    groove: 10,
+    now: 8,
+    driest: 6,
+    wettest: 12,
+  },
+  input: panelGapInput,
+  work: workPanelGap,
+});

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 export const riseAndRunInput = z.object({
@@ -47,3 +48,15 @@ export function workRiseAndRun(input: z.output<typeof riseAndRunInput>): Outcome
     },
   };
 }
+
+/** The aid "Angle by rise and run". */
+export const riseAndRunAid = defineAid({
+  id: 'rise-and-run',
+  title: 'Angle by rise and run',
+  what: 'An angle from what it rises over a length, to set a blade or a gauge by.',
+  sources: 'Geometry, computed.',
+  caution: 'Unplug before you measure at the blade.',
+  example: { rise: 15, run: 500 },
+  input: riseAndRunInput,
+  work: workRiseAndRun,
+});

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { chord, fullHeight, tilted } from '../../trade/saws';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 export const sawDepthInput = z.object({
@@ -74,3 +75,16 @@ export function workSawDepth(input: z.output<typeof sawDepthInput>): Outcome<Saw
     },
   };
 }
+
+/** The aid "Depth of cut". */
+export const sawDepthAid = defineAid({
+  id: 'saw-depth',
+  title: 'Depth of cut',
+  what: 'Depth that is left above a base, upright and tilted, and the blade’s length in the face.',
+  sources: 'Geometry of a circle, computed.',
+  caution:
+    'Guard, riving knife and the machine’s manual come first; a cut that does not go through wants other guards. Unplug before you measure at the blade.',
+  example: { diameter: 254, arborBelow: 50, base: 18, bevel: 0, stock: 50 },
+  input: sawDepthInput,
+  work: workSawDepth,
+});

@@ -8,6 +8,7 @@ import {
   shankDiameter,
 } from '../../trade/screws';
 import { woodScrews } from '../../trade/screws.data';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 export const screwSeries = ['us', 'british', 'metric'] as const;
@@ -129,3 +130,16 @@ export function workScrewHoles(input: z.output<typeof screwHolesInput>): Outcome
     },
   };
 }
+
+/** The aid "Holes for a screw". */
+export const screwHolesAid = defineAid({
+  id: 'screw-holes',
+  title: 'Holes for a screw',
+  what: 'Pilot, clearance and countersink, with the drill for each.',
+  sources:
+    'Shank ASME B18.6.1 (British: an old text); root two thirds, USDA Wood Handbook ch. 8; pilot 70 and 90 % of the root from memory. Design codes and trade charts differ.',
+  caution: 'Clamp small work; hold no piece in the hand under a drill.',
+  example: { series: 'us', gauge: 8, wood: 'hard' },
+  input: screwHolesInput,
+  work: workScrewHoles,
+});

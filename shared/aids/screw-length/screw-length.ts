@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { leastBite } from '../../trade/shop.data';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 import { screwFields, shankOf } from '../screw-holes/screw-holes';
 
@@ -93,3 +94,15 @@ export function workScrewLength(
     },
   };
 }
+
+/** The aid "Length of a screw". */
+export const screwLengthAid = defineAid({
+  id: 'screw-length',
+  title: 'Length of a screw',
+  what: 'The longest screw for a stack that does not come through, and its bite.',
+  sources:
+    'Arithmetic; threaded share two thirds (US, from memory) or 0.6 (British text); bite of three diameters and 3 mm left: common practice, no source.',
+  example: { series: 'us', gauge: 8, through: [19.05], into: 38.1 },
+  input: screwLengthInput,
+  work: workScrewLength,
+});

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { metricPlywoodLimits, plywoodTolerance } from '../../trade/lumber';
 import { plywoodCategories } from '../../trade/lumber.data';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 const inch = 25.4;
@@ -76,3 +77,15 @@ export function workSheetThickness(
           : 'near';
   return { ok: true, result: { nominal, least, greatest, verdict } };
 }
+
+/** The aid "Thickness of a sheet". */
+export const sheetThicknessAid = defineAid({
+  id: 'sheet-thickness',
+  title: 'Thickness of a sheet',
+  what: 'How thick a sheet of its category may be, and whether yours is.',
+  sources:
+    'PS 1 as its producers’ association prints it; EN 315 (sanded read in GB/T 9846.3, unsanded from memory).',
+  example: { standard: 'ps1', category: '23/32', sanded: false, measured: 17.9 },
+  input: sheetThicknessInput,
+  work: workSheetThickness,
+});

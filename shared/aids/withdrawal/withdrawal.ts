@@ -6,6 +6,7 @@ import {
   triedGauges,
   ultimateWithdrawal,
 } from '../../trade/withdrawal';
+import { defineAid } from '../aid';
 import { refused, type Outcome, type Refused } from '../outcome';
 
 export const withdrawalInput = z.object({
@@ -96,3 +97,17 @@ export function workWithdrawal(input: z.output<typeof withdrawalInput>): Outcome
   const allowable = allowableWithdrawal(fastener, gravity, diameter, bite);
   return { ok: true, result: { ultimate, allowable, ratio: ultimate / allowable } };
 }
+
+/** The aid "Pull-out of a screw or nail". */
+export const withdrawalAid = defineAid({
+  id: 'withdrawal',
+  title: 'Pull-out of a screw or nail',
+  what: 'What it pulls out at, and apart from it what a design may count on.',
+  sources:
+    'Ultimate: USDA Wood Handbook ch. 8 (screws from memory, nails by FPL notes). Allowable: NDS reference values before the code’s own factors.',
+  caution:
+    'Nothing over people’s heads hangs on these figures: ask whoever is licensed to say, and the fastener’s maker.',
+  example: { fastener: 'screw', gravity: 0.5, diameter: 4.17, bite: 30, grain: 'side' },
+  input: withdrawalInput,
+  work: workWithdrawal,
+});

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { movement } from '../../trade/movement';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 import { coefficientFor, moistureRange, linearShare, woodFields } from '../wood';
 
@@ -46,3 +47,15 @@ export function workWoodMovement(
     },
   };
 }
+
+/** The aid "Wood movement". */
+export const woodMovementAid = defineAid({
+  id: 'wood-movement',
+  title: 'Wood movement',
+  what: 'How much a board grows or shrinks across the grain.',
+  sources:
+    'USDA Wood Handbook FPL-GTR-190, Eq. 13–2 and Table 13–5, 6 to 14 % moisture; some softwoods computed, redwood, white pine, teak and mahogany from memory.',
+  example: { wood: 'cherry', cut: 'flat', width: 300, from: 8, to: 12 },
+  input: woodMovementInput,
+  work: workWoodMovement,
+});

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { gravitySpread, specificGravity } from '../../trade/gravity.data';
 import { woodDensity } from '../../trade/lumber';
 import { twoPeopleLift } from '../../trade/shop.data';
+import { defineAid } from '../aid';
 import { refused, type Outcome } from '../outcome';
 
 export const woodWeightInput = z.object({
@@ -63,3 +64,16 @@ export function workWoodWeight(input: z.output<typeof woodWeightInput>): Outcome
     },
   };
 }
+
+/** The aid "Weight of wood". */
+export const woodWeightAid = defineAid({
+  id: 'wood-weight',
+  title: 'Weight of wood',
+  what: 'What a piece or a pile weighs.',
+  sources:
+    'USDA Wood Handbook FPL-GTR-190 ch. 4 and Table 5–3, from memory; pieces of one species differ by a tenth.',
+  caution: 'Over 25 kg two people lift (common practice, no source).',
+  example: { wood: 'white oak', thickness: 50, width: 200, length: 2000 },
+  input: woodWeightInput,
+  work: workWoodWeight,
+});

@@ -1,0 +1,35 @@
+import { type AnyAid } from './aid';
+import { bladeSpeedAid } from './blade-speed/blade-speed';
+import { boardFeetAid } from './board-feet/board-feet';
+import { dressedSizeAid } from './dressed-size/dressed-size';
+import { glueWaitAid } from './glue-wait/glue-wait';
+import { MoistureAid } from './moisture/moisture';
+import { noiseDoseAid } from './noise-dose/noise-dose';
+import { panelGapAid } from './panel-gap/panel-gap';
+import { riseAndRunAid } from './rise-and-run/rise-and-run';
+import { sawDepthAid } from './saw-depth/saw-depth';
+import { screwHolesAid } from './screw-holes/screw-holes';
+import { screwLengthAid } from './screw-length/screw-length';
+import { sheetThicknessAid } from './sheet-thickness/sheet-thickness';
+import { withdrawalAid } from './withdrawal/withdrawal';
+import { woodMovementAid } from './wood-movement/wood-movement';
+import { woodWeightAid } from './wood-weight/wood-weight';
+
+/** Every aid, in the order the Bench lists them. Adding one: its folder here, its folder in components/aids, and a line in each list. */
+export const aids: readonly AnyAid[] = [
+  MoistureAid,
+  woodMovementAid,
+  panelGapAid,
+  screwHolesAid,
+  screwLengthAid,
+  withdrawalAid,
+  boardFeetAid,
+  dressedSizeAid,
+  sheetThicknessAid,
+  woodWeightAid,
+  sawDepthAid,
+  bladeSpeedAid,
+  riseAndRunAid,
+  noiseDoseAid,
+  glueWaitAid,
+];
