@@ -21,3 +21,5 @@ export {
   type WhyUnplaced,
 } from './types';
 export { partUnits, stockUnits, unitsPerMm, unitsToMm } from './units';
+export { solve, type SolveOptions } from './solve';
+export { type BrokenRule, type Fault, verifyLayout } from './verify';
