@@ -22,7 +22,22 @@ function inputs(aid: AnyAid): string {
     .join(' | ');
 }
 
-function list(): number {
+/** Every aid with its inputs as JSON Schema, and an input that works. */
+const listed = () =>
+  aids.map(({ id, title, what, sources, example, schema }) => ({
+    name: id,
+    title,
+    what,
+    sources,
+    example,
+    inputs: schema(),
+  }));
+
+function list(json: boolean): number {
+  if (json) {
+    console.log(JSON.stringify(listed(), null, 1));
+    return 0;
+  }
   for (const aid of aids) {
     console.log(`${aid.id.padEnd(18)} ${aid.title}: ${aid.what}`);
     console.log(`${' '.repeat(19)}inputs: ${inputs(aid)}`);
@@ -33,13 +48,14 @@ function list(): number {
 
 /** Lengths in mm, temperatures in °C, times in minutes, forces in N. 0 worked out, 1 refused, 2 no such aid or no JSON. */
 export async function run(argv: string[]): Promise<number> {
+  if (argv.includes('--list')) return list(argv.includes('--json'));
   const { values, positionals } = parseArgs({
     args: argv,
     allowPositionals: true,
-    options: { json: { type: 'string' }, list: { type: 'boolean' } },
+    options: { json: { type: 'string' } },
   });
   const [id] = positionals;
-  if (values.list || id === undefined) return list();
+  if (id === undefined) return list(false);
   const aid = aids.find((each) => each.id === id);
   if (!aid) {
     console.error(`There is no aid ${id}. aid --list names them.`);

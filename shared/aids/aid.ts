@@ -1,5 +1,6 @@
 import { z } from 'zod';
-import { type Outcome } from './outcome';
+import { readFigures } from './figures';
+import { refused, type Outcome } from './outcome';
 
 /** A bench aid without its types: what the list, the command line and the screens' frame need. */
 export interface AnyAid {
@@ -35,15 +36,36 @@ export function defineAid<S extends z.ZodType, R>(
     ...aid,
     schema: () => z.toJSONSchema(aid.input, { io: 'input' }),
     run: (raw) => {
-      const parsed = aid.input.safeParse(raw);
-      if (parsed.success) return aid.work(parsed.data);
-      const [issue] = parsed.error.issues;
-      return {
-        ok: false,
-        field: issue?.path.join('.') || 'input',
-        reason: issue?.message ?? 'This is no input for the aid.',
-        cure: 'Give every input in its kind; figures as numbers.',
-      };
+      const strict = aid.input instanceof z.ZodObject ? aid.input.strict() : aid.input;
+      const parsed = readFigures(strict, raw);
+      if (!parsed.success) return refusal(parsed.error);
+      const outcome = aid.work(parsed.data as z.output<S>);
+      return outcome.ok && !allFinite(outcome.result)
+        ? refused('input', 'These figures lead to no finite answer.', 'Check them again.')
+        : outcome;
     },
   };
+}
+
+/** The first thing that does not fit, by its place in the input. */
+function refusal(error: z.ZodError): Outcome<never> {
+  const [issue] = error.issues;
+  if (issue?.code === 'unrecognized_keys')
+    return refused(
+      issue.keys.join(', '),
+      `There is no input ${issue.keys.join(', ')}.`,
+      'Leave it out; the list of aids names the inputs.',
+    );
+  return refused(
+    issue?.path.join('.') || 'input',
+    issue?.message ?? 'This is no input for the aid.',
+    'Give every input in its kind; lengths as millimetres or as written, "3/4 in".',
+  );
+}
+
+/** No figure that is not a number leaves an aid. */
+function allFinite(value: unknown): boolean {
+  if (typeof value === 'number') return Number.isFinite(value);
+  if (typeof value !== 'object' || value === null) return true;
+  return Object.values(value).every(allFinite);
 }
