@@ -3,7 +3,6 @@ import { View } from 'react-native';
 import { type BenchCopy } from '../../shared/api/bench';
 import { type BenchState } from '../../shared/plan/bench/fold';
 import { type Step } from '../../shared/plan/document';
-import { ClipPlayer } from '../plans/clip-player';
 import { type PlanValues } from '../plans/plan-model';
 import { StandingLines } from '../plans/standing-lines';
 import { StepPhotos } from '../plans/step-photos';
@@ -12,15 +11,14 @@ import { KeptFiles } from '../service-worker/kept-files';
 import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
 import { Icon } from '../ui/icon';
-import { useMe } from '../data/me-queries';
-import { usePreferences } from '../data/preferences';
 import { Row, Stack } from '../ui/layout';
-import { SegmentedControl } from '../ui/radio-group';
 import { Prose } from '../ui/prose';
 import { Text } from '../ui/text';
 import { TextArea } from '../ui/text-field';
 import { type NewEntry } from './bench-queries';
 import { CheckCard } from './check-card';
+import { BenchClip } from './bench-clip';
+import { BenchWays } from './bench-ways';
 import { ClipSays } from './clip-says';
 import { DimensionLineup } from './dimension-lineup';
 import { WaitTimer } from './wait-timer';
@@ -33,27 +31,20 @@ export interface BenchStepProps {
   values: PlanValues;
   add: (entry: NewEntry) => Promise<Entry>;
   now: number;
+  /** Whether the screen stays on; see `useAwake`. */
+  awake: boolean | null;
 }
 
 /** One step: clip over its stretch, what the clip says otherwise, the action, its figures, cautions, waits, notes. */
 export function BenchStep(props: BenchStepProps) {
   const { step, copy, state, values, add } = props;
-  const stretch = step.stretches[0];
   const asked = copy.document.dimensions.filter(
     (d) => step.takes.includes(d.id) || step.holds.includes(d.id),
   );
   const references = useMemo(() => referencesOf(copy.document, values), [copy.document, values]);
   return (
     <Stack gap={16}>
-      {stretch ? (
-        <ClipPlayer
-          key={`clip-${step.id}`}
-          clip={copy.document.clip}
-          stretch={stretch}
-          label={`Clip of step: ${step.title}`}
-          cover={copy.document.cover}
-        />
-      ) : null}
+      <BenchClip key={`clip-${step.id}`} step={step} document={copy.document} />
       <ClipSays step={step} values={values} />
       <StandingLines step={step} document={copy.document} />
       {step.cautions.map((caution) => (
@@ -96,27 +87,10 @@ export function BenchStep(props: BenchStepProps) {
         />
       ))}
       {state.ticks.has(step.id) ? <Undo {...props} /> : null}
-      <Units />
+      <BenchWays awake={props.awake} />
       <Notes key={`notes-${step.id}`} {...props} />
       <KeptFiles copy={copy} />
     </Stack>
-  );
-}
-
-/** The units, switched where the work is. */
-function Units() {
-  const { me } = useMe();
-  const [{ units }, change] = usePreferences(me !== null);
-  return (
-    <SegmentedControl
-      label="Figures in"
-      options={[
-        { value: 'mm', label: 'millimetres' },
-        { value: 'in', label: 'inches' },
-      ]}
-      value={units}
-      onChange={(next) => change({ units: next })}
-    />
   );
 }
 
@@ -142,9 +116,15 @@ function Notes({ step, state, add }: BenchStepProps) {
   const [text, setText] = useState('');
   const notes = state.notes.get(step.id) ?? [];
   const keep = async () => {
-    if (text.trim() === '') return;
-    await add({ kind: 'note', elementId: step.id, text: text.trim() });
+    const words = text.trim();
+    if (words === '') return;
     setText('');
+    try {
+      await add({ kind: 'note', elementId: step.id, text: words });
+    } catch (error) {
+      setText(words);
+      throw error;
+    }
   };
   return (
     <View>

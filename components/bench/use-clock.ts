@@ -1,11 +1,17 @@
 import { useEffect, useState } from 'react';
 
-/** Milliseconds now, renewed every `every` milliseconds. */
-export function useClock(every: number): number {
+/** Milliseconds now, renewed every `every` milliseconds; it stands while `every` is null. */
+export function useClock(every: number | null): number {
   const [now, setNow] = useState(() => Date.now());
   useEffect(() => {
-    const timer = setInterval(() => setNow(Date.now()), every);
-    return () => clearInterval(timer);
+    if (every === null) return;
+    const tick = () => setNow(Date.now());
+    const first = setTimeout(tick, 0);
+    const timer = setInterval(tick, every);
+    return () => {
+      clearTimeout(first);
+      clearInterval(timer);
+    };
   }, [every]);
   return now;
 }

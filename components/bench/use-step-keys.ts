@@ -1,9 +1,9 @@
 import { useEffect } from 'react';
 
-const forth = new Set(['PageDown', 'ArrowRight']);
+const forth = new Set(['PageDown', 'ArrowRight', ' ']);
 const back = new Set(['PageUp', 'ArrowLeft']);
 
-/** Keys and foot pedals: page keys and arrows, never while something is typed or a control has the focus for them. */
+/** Keys and foot pedals: page keys, arrows and space, never while something is typed or a control has the focus for them. */
 export function useStepKeys(keys: { next: () => void; back: () => void; off: boolean }): void {
   useEffect(() => {
     if (keys.off) return;
@@ -16,6 +16,8 @@ export function useStepKeys(keys: { next: () => void; back: () => void; off: boo
         )
       )
         return;
+      // Space presses what has the focus.
+      if (event.key === ' ' && target?.closest('button, a, summary, [role="button"]')) return;
       if (forth.has(event.key)) keys.next();
       else if (back.has(event.key)) keys.back();
       else return;

@@ -7,6 +7,7 @@ import { Icon } from '../ui/icon';
 import { Row, Stack } from '../ui/layout';
 import { Text } from '../ui/text';
 import { colour, line } from '../ui/tokens';
+import { armBell } from './bell';
 import { type NewEntry } from './bench-queries';
 
 const pad = (n: number) => String(n).padStart(2, '0');
@@ -62,13 +63,14 @@ export function WaitTimer({ wait, started, now, add }: WaitTimerProps) {
         <Button
           size="bench"
           label="Start the wait"
-          onPress={() =>
+          onPress={() => {
+            armBell();
             void add({
               kind: 'wait-start',
               elementId: wait.id,
-              startedAt: new Date(now).toISOString(),
-            })
-          }
+              startedAt: new Date().toISOString(),
+            });
+          }}
         />
       )}
     </Row>

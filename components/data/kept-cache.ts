@@ -1,5 +1,6 @@
-import { mediaPath } from '../../shared/api/media';
+import { getRenditions, mediaPath, stretchName } from '../../shared/api/media';
 import { type PlanDocument } from '../../shared/plan/document';
+import { call } from './api-client';
 import { keptFilesCache } from './kept-names';
 import { NoSignal } from './problems';
 
@@ -9,7 +10,7 @@ export interface KeptFile {
   bytes: number;
 }
 
-/** Addresses of the everything the steps of a plan show: pictures, captions and the clip, each once. */
+/** Addresses of the the pictures and captions the steps of a plan show, each once. */
 export function filesOf(document: PlanDocument): string[] {
   const { clip, cover, photos, steps } = document;
   const used = new Set(steps.flatMap((step) => step.photoIds));
@@ -17,10 +18,18 @@ export function filesOf(document: PlanDocument): string[] {
     ...(cover ? [mediaPath(cover, 'large')] : []),
     ...photos.filter((photo) => used.has(photo.id)).map((photo) => mediaPath(photo.media, 'large')),
     ...(clip.source !== 'none' && clip.captions ? [mediaPath(clip.captions, 'original')] : []),
-    // Last: it is by far the largest, and the rest should not wait for it.
-    ...(clip.source === 'upload' ? [mediaPath(clip.media, '720')] : []),
   ];
   return [...new Set(paths)];
+}
+
+/** The clip: as the stretches the steps show where those are cut, or whole. Throws `NoSignal`. */
+export async function clipFilesOf(document: PlanDocument, signal: AbortSignal): Promise<string[]> {
+  const { clip, steps } = document;
+  if (clip.source !== 'upload') return [];
+  const stretches = [...new Set(steps.flatMap((step) => step.stretches.map(stretchName)))];
+  const { renditions } = await call(getRenditions, { params: { hash: clip.media }, signal });
+  const cut = stretches.length > 0 && stretches.every((name) => renditions.includes(name));
+  return (cut ? stretches : ['720']).map((name) => mediaPath(clip.media, name));
 }
 
 const open = () => caches.open(keptFilesCache);

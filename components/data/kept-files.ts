@@ -2,6 +2,7 @@ import { get, update } from 'idb-keyval';
 import { type PlanDocument } from '../../shared/plan/document';
 import {
   cachesThere,
+  clipFilesOf,
   clearKeptCache,
   dropFromCache,
   fetchIntoCache,
@@ -39,6 +40,8 @@ const storeKey = 'scantling-kept-files';
 const measuring: KeptState = { at: 'measuring' };
 const states = new Map<string, KeptState>();
 const running = new Map<string, AbortController>();
+/** Addresses of files that are here whole. */
+const here = new Set<string>();
 const listeners = new Set<() => void>();
 
 function set(copyId: string, state: KeptState): void {
@@ -53,6 +56,8 @@ export const keptStore = {
     return () => listeners.delete(listener);
   },
   of: (copyId: string): KeptState => states.get(copyId) ?? measuring,
+  /** Whether a file is known to be on this device. */
+  isHere: (path: string): boolean => here.has(path),
 };
 
 const total = (files: readonly KeptFile[]) => files.reduce((sum, file) => sum + file.bytes, 0);
@@ -72,7 +77,8 @@ async function measured(copyId: string, document: PlanDocument): Promise<KeptRec
   const known = (await readAll())[copyId];
   if (known?.form === form && !known.partly) return known;
   const signal = new AbortController().signal;
-  const paths = filesOf(document);
+  // The clip last: it is by far the largest, and the rest should not wait for it.
+  const paths = [...filesOf(document), ...(await clipFilesOf(document, signal))];
   const found = await Promise.all(paths.map((path) => measureFile(path, signal)));
   const files = found.filter((file) => file !== null);
   const choice = known?.choice ?? 'undecided';
@@ -89,7 +95,8 @@ async function measured(copyId: string, document: PlanDocument): Promise<KeptRec
  */
 export async function openKept(copyId: string, document: PlanDocument): Promise<void> {
   if (!cachesThere() || running.has(copyId)) return;
-  if (filesOf(document).length === 0) return set(copyId, { at: 'nothing' });
+  if (filesOf(document).length === 0 && document.clip.source !== 'upload')
+    return set(copyId, { at: 'nothing' });
   void askToStay();
   try {
     const { choice, files } = await measured(copyId, document);
@@ -107,6 +114,7 @@ async function fetchAll(copyId: string, files: KeptFile[], stop: AbortSignal): P
   const there = await Promise.all(files.map(isKept));
   const missing = files.filter((_, i) => !there[i]);
   let done = bytes - total(missing);
+  files.forEach((file, i) => there[i] && here.add(file.path));
   if (missing.length === 0) return set(copyId, { at: 'kept', bytes });
   const room = await roomLeft();
   if (room !== null && room < bytes - done) return set(copyId, { at: 'no-room', bytes, room });
@@ -116,6 +124,7 @@ async function fetchAll(copyId: string, files: KeptFile[], stop: AbortSignal): P
       done += more;
       if (!stop.aborted) set(copyId, { at: 'keeping', bytes, done });
     });
+    here.add(file.path);
   }
   set(copyId, { at: 'kept', bytes });
 }
@@ -158,7 +167,9 @@ export async function leaveOut(copyId: string): Promise<void> {
   const records = await readAll();
   const files = records[copyId]?.files ?? [];
   await record(copyId, { form, choice: 'leave-out', files });
-  await dropFromCache(only(records, copyId));
+  const gone = only(records, copyId);
+  gone.forEach((path) => here.delete(path));
+  await dropFromCache(gone);
   set(copyId, { at: 'left-out', bytes: total(files) });
 }
 
@@ -180,6 +191,7 @@ export async function clearKeptFiles(): Promise<void> {
   running.forEach((stop) => stop.abort());
   running.clear();
   states.clear();
+  here.clear();
   await change(() => ({}));
   await clearKeptCache();
   listeners.forEach((listener) => listener());

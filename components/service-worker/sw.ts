@@ -9,8 +9,18 @@ interface WorkerScope {
   /** Filled in by scripts/service-worker.mjs. */
   __WB_MANIFEST: { url: string; revision: string | null }[];
   location: Location;
-  clients: { claim(): Promise<void> };
+  clients: {
+    claim(): Promise<void>;
+    matchAll(what: { type: 'window' }): Promise<{ url: string; focus(): Promise<unknown> }[]>;
+  };
   skipWaiting(): Promise<void>;
+  addEventListener(
+    name: 'notificationclick',
+    listener: (event: {
+      notification: { close(): void };
+      waitUntil(work: Promise<unknown>): void;
+    }) => void,
+  ): void;
   addEventListener(name: 'message', listener: (event: MessageEvent<unknown>) => void): void;
   addEventListener(
     name: 'activate',
@@ -57,6 +67,15 @@ registerRoute(
     return request.headers.has('range') ? createPartialResponse(request, kept) : kept;
   },
 );
+
+// A notice that rings leads back to the bench it rang for.
+self.addEventListener('notificationclick', (event) => {
+  event.notification.close();
+  const shown = self.clients
+    .matchAll({ type: 'window' })
+    .then((pages) => pages.find((page) => page.url.includes('/bench/'))?.focus());
+  event.waitUntil(shown);
+});
 
 // A new version waits until the person takes it; only then does it come in.
 self.addEventListener('message', (event) => {

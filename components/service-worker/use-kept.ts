@@ -1,5 +1,6 @@
 import { useEffect, useState, useSyncExternalStore } from 'react';
 import { type BenchCopy } from '../../shared/api/bench';
+import { mediaPath, stretchName, wholeSeconds } from '../../shared/api/media';
 import { dropStrays, keptStore, openKept, type KeptState } from '../data/kept-files';
 import { askToStay } from '../data/storage-room';
 
@@ -16,6 +17,20 @@ export function useKept({ id, document }: Pick<BenchCopy, 'id' | 'document'>): K
     () => keptStore.of(id),
     () => keptStore.of(id),
   );
+}
+
+/** The file cut for a stretch of a clip, when it is on this device; `from` is the second it begins at. */
+export function useKeptCut(
+  media: string,
+  stretch: { start: number; end: number },
+): { path: string; from: number } | null {
+  const path = mediaPath(media, stretchName(stretch));
+  const there = useSyncExternalStore(
+    keptStore.subscribe,
+    () => keptStore.isHere(path),
+    () => false,
+  );
+  return there ? { path, from: wholeSeconds(stretch).start } : null;
 }
 
 /** Whether the browser promised not to clear what is stored here; null until it has answered. */
