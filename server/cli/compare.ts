@@ -65,7 +65,7 @@ async function compare(argv: string[]): Promise<number> {
     const pref = { system: after.units, instrument: 'calipers' as const, grid: 64 as const };
     for (const item of notice.items)
       console.log(
-        `${meaningWord(item.means).padEnd(18)} ${item.change.name}: ${describeItem(item, comparison.after, pref)}`,
+        `${meaningWord(item.means).padEnd(18)} ${item.change.name}: ${describeItem(item, pref)}`,
       );
   } else for (const change of comparison.changes) console.log(line(change));
   return comparison.changes.length > 0 ? 1 : 0;

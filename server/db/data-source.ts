@@ -1,6 +1,12 @@
 import { DataSource } from 'typeorm';
 import { BenchCopyEntity, BenchEntryEntity, ShopCardEntity } from './entities/bench';
 import { CaseEntity, LogEntity, LogTextEntity, ReportEntity, RulingEntity } from './entities/cases';
+import {
+  CorrectionEntity,
+  LetterEntity,
+  NoticeEntity,
+  NoticeSettingEntity,
+} from './entities/notices';
 import { MediaEntity, MediaOwnerEntity, MediaUseEntity } from './entities/media';
 import { UploadEntity, UploadPartEntity } from './entities/upload';
 import { EmailTokenEntity, PersonEntity } from './entities/person';
@@ -11,6 +17,7 @@ import { Plans1764580100000 } from './migrations/1764580100000-plans';
 import { TalkAndOrder1764580200000 } from './migrations/1764580200000-talk-and-order';
 import { MediaWork1764581100000 } from './migrations/1764581100000-media-work';
 import { Uploads1764581200000 } from './migrations/1764581200000-uploads';
+import { Notices1764583000000 } from './migrations/1764583000000-notices';
 
 export const entities = [
   PersonEntity,
@@ -28,6 +35,10 @@ export const entities = [
   ShopCardEntity,
   CommentEntity,
   CommentVersionEntity,
+  CorrectionEntity,
+  LetterEntity,
+  NoticeEntity,
+  NoticeSettingEntity,
   CaseEntity,
   ReportEntity,
   RulingEntity,
@@ -40,6 +51,7 @@ export const migrations = [
   TalkAndOrder1764580200000,
   MediaWork1764581100000,
   Uploads1764581200000,
+  Notices1764583000000,
 ];
 
 /** The database at an address; the schema changes by migrations only. */

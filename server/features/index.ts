@@ -5,6 +5,7 @@ import { registerBench } from './bench/bench.routes';
 import { registerCases } from './cases/cases.routes';
 import { registerDrafts } from './drafts/drafts.routes';
 import { registerMedia } from './media/media.routes';
+import { registerNotices } from './notices/notices.routes';
 import { registerPeople } from './people/people.routes';
 import { registerPlans } from './plans/plans.routes';
 import { registerTalk } from './talk/talk.routes';
@@ -20,6 +21,7 @@ export function registerFeatures(router: Router, deps: Deps): void {
     registerUploads,
     registerBench,
     registerTalk,
+    registerNotices,
     registerCases,
     registerPeople,
   ]) {

@@ -19,6 +19,7 @@ export const catalogue = {
   'drafts/published': [409, 'A published plan cannot be thrown away'],
   'plans/check-sheet': [422, 'The check sheet fails'],
   'bench/entry-differs': [409, 'That entry is already there with other content'],
+  'bench/older': [409, 'That revision is an older one'],
   'bench/full': [409, 'The bench copy is full'],
   'shop-card/stale-version': [409, 'Another device saved first'],
   'uploads/type': [422, 'That is not the kind of file we take here'],

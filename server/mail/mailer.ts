@@ -6,6 +6,7 @@ export interface AddressedLetter extends Letter {
   to: string;
   /** Stable: the same letter sent twice carries the same Message-ID. */
   messageId: string;
+  headers?: Record<string, string>;
 }
 
 const escape = (text: string) => text.replace(/[&<>"]/g, (c) => `&#${c.charCodeAt(0)};`);
@@ -36,6 +37,7 @@ export function makeMailer(env: Env) {
         text: letter.text,
         html: asHtml(letter.text),
         messageId: letter.messageId,
+        ...(letter.headers ? { headers: letter.headers } : {}),
       });
     },
     close: () => transport.close(),

@@ -3,6 +3,7 @@ import { entrySchema } from '../plan/bench/entry';
 import { planDocumentSchema } from '../plan/document';
 import { id, idParams, personRefSchema, timestamp } from './common';
 import { contract } from './contract';
+import { copyCorrectionSchema } from './notices';
 import { planCardSchema, revisionRefSchema } from './plans';
 
 export const benchCopyRefSchema = z.object({
@@ -33,6 +34,8 @@ export type StoredEntry = z.infer<typeof storedEntrySchema>;
 export const benchCopySchema = benchCopyRefSchema.extend({
   document: planDocumentSchema,
   entries: z.array(storedEntrySchema),
+  /** A newer revision with its reasons, and what it means here. */
+  correction: copyCorrectionSchema.nullable(),
 });
 export type BenchCopy = z.infer<typeof benchCopySchema>;
 
@@ -86,6 +89,18 @@ export const putEntry = contract({
   params: z.object({ copyId: id, entryId: id }),
   body: entrySchema,
   response: storedEntrySchema,
+});
+export const moveCopy = contract({
+  id: 'moveCopy',
+  method: 'PUT',
+  path: '/bench/:copyId/revision',
+  access: 'person',
+  limit: 'write',
+  summary:
+    'Move a bench copy to a later revision of its plan; entries come along where what they are about is still there.',
+  params: idParams('copyId'),
+  body: z.object({ revisionId: id }),
+  response: benchCopySchema,
 });
 export const removeCopy = contract({
   id: 'removeCopy',
@@ -168,6 +183,7 @@ export const benchContracts = [
   getCopy,
   listEntries,
   putEntry,
+  moveCopy,
   removeCopy,
   getShopCard,
   saveShopCard,

@@ -3,6 +3,7 @@ import { benchContracts } from './bench';
 import { caseContracts } from './cases';
 import { type Contract } from './contract';
 import { mediaContracts } from './media';
+import { noticeContracts } from './notices';
 import { planContracts } from './plans';
 import { talkContracts } from './talk';
 import { uploadContracts } from './uploads';
@@ -15,5 +16,6 @@ export const contracts: readonly Contract[] = [
   ...uploadContracts,
   ...benchContracts,
   ...talkContracts,
+  ...noticeContracts,
   ...caseContracts,
 ];

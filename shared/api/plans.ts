@@ -3,6 +3,7 @@ import { planDocumentSchema } from '../plan/document';
 import { id, idParams, pageOf, pageQuery, personRefSchema, timestamp } from './common';
 import { contract } from './contract';
 import { limits } from './limits';
+import { correctionBody } from './notices';
 
 export const revisionLetter = z.string().regex(/^[A-Z]{1,3}$/);
 
@@ -210,6 +211,8 @@ export const publishPlan = contract({
       )
       .max(100)
       .default([]),
+    /** Tells the bench copies it touches; without it the revision is quiet. */
+    correction: correctionBody.optional(),
   }),
   response: z.object({ revision: revisionRefSchema, slug: z.string() }),
 });

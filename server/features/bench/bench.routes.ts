@@ -10,6 +10,7 @@ import { ApiError, missing } from '../../http/errors';
 import { route, signedIn } from '../../http/route';
 import { findPersonById } from '../accounts/accounts.repository';
 import { presentPerson } from '../accounts/accounts.presenter';
+import { correctionFor } from '../notices/corrections.service';
 import { canSeePlan } from '../plans/plans.policy';
 import { frozenRevision } from '../plans/frozen';
 import { findPlan } from '../plans/plans.repository';
@@ -50,7 +51,8 @@ async function presentCopy(deps: Deps, copy: BenchCopyEntity): Promise<api.Bench
   if (!maker) throw missing('That bench copy');
   const { document, facts } = revision;
   const entries = rows.map(presentEntry);
-  const state = foldEntries(entries.map(({ entry, sequence }) => ({ entry, sequence })));
+  const ordered = entries.map(({ entry, sequence }) => ({ entry, sequence }));
+  const state = foldEntries(ordered);
   return {
     id: copy.id,
     planId: plan.id,
@@ -75,6 +77,7 @@ async function presentCopy(deps: Deps, copy: BenchCopyEntity): Promise<api.Bench
     },
     document,
     entries,
+    correction: await correctionFor(deps, copy, plan, ordered),
   };
 }
 
@@ -99,6 +102,22 @@ async function start(
     throw missing('That plan');
   const copies = deps.db.getRepository(BenchCopyEntity);
   return copies.save(copies.create({ id: copyId, personId: person.id, planId, revisionId }));
+}
+
+/** Moves a bench copy on. Entries keep their element ids, so they come along where those are still there. */
+async function move(deps: Deps, copy: BenchCopyEntity, revisionId: string): Promise<void> {
+  const [from, to] = await Promise.all([
+    frozenRevision(deps.db, copy.revisionId),
+    frozenRevision(deps.db, revisionId),
+  ]);
+  if (!from || to?.row.planId !== copy.planId) throw missing('That revision');
+  if (to.row.publishedAt < from.row.publishedAt)
+    throw new ApiError(
+      'bench/older',
+      'A bench copy only moves on to later revisions. Nothing was changed.',
+    );
+  copy.revisionId = revisionId;
+  await deps.db.getRepository(BenchCopyEntity).update({ id: copy.id }, { revisionId });
 }
 
 function entryRoutes(router: Router, deps: Deps): void {
@@ -193,6 +212,11 @@ export function registerBench(router: Router, deps: Deps): void {
   route(router, deps, api.getCopy, async ({ params, person }) =>
     presentCopy(deps, await ownCopy(deps, params.copyId, signedIn(person))),
   );
+  route(router, deps, api.moveCopy, async ({ params, body, person }) => {
+    const copy = await ownCopy(deps, params.copyId, signedIn(person));
+    await move(deps, copy, body.revisionId);
+    return presentCopy(deps, copy);
+  });
   route(router, deps, api.removeCopy, async ({ params, person }) => {
     const copy = await ownCopy(deps, params.copyId, signedIn(person));
     await deps.db.getRepository(BenchCopyEntity).delete({ id: copy.id });

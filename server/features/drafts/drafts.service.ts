@@ -15,6 +15,7 @@ import { PlanEntity, RevisionEntity, type Override } from '../../db/entities/pla
 import { type Deps } from '../../deps';
 import { ApiError, missing } from '../../http/errors';
 import { canDraft, canPublish } from '../plans/plans.policy';
+import { addCorrection } from '../notices/corrections.service';
 import { listedIds } from './element-ids';
 
 /** The plan for its maker, or as if it were not there. */
@@ -244,6 +245,8 @@ export async function publishDraft(
     await manager.getRepository(PlanEntity).save(plan);
     await deriveCard(manager, planId, document);
     await queueStretches(deps, document, manager);
+    if (body.correction && last)
+      await addCorrection(deps, manager, planId, revision.id, body.correction);
     return { plan, revision };
   });
 }

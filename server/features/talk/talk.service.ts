@@ -15,6 +15,7 @@ import { frozenRevision, type FrozenRevision } from '../plans/frozen';
 import { canSeePlan, canTalkOn } from '../plans/plans.policy';
 import { findPlan } from '../plans/plans.repository';
 import { canDelete, canEdit, canSettle } from './talk.policy';
+import { tellOfComment, tellOfSettling } from './talk.notices';
 import { presentComment } from './talk.presenter';
 
 export async function visiblePlan(
@@ -196,22 +197,25 @@ export async function post(
       'This plan is not open for talk now. Your words were not sent; keep a copy.',
     );
   const place = await anchorFor(deps, body, plan, revision);
-  const comment = await comments.save(
-    comments.create({
-      id: body.id,
-      planId,
-      letter: revision.row.letter,
-      kind: body.kind,
-      ...place,
-      stance: body.kind === 'critique' ? body.stance : null,
-      text: body.text,
-      why: body.kind === 'critique' ? body.why : '',
-      authorId: person.id,
-      settledBy: null,
-      state: 'shown',
-      editedAt: null,
-    }),
-  );
+  const comment = comments.create({
+    id: body.id,
+    planId,
+    letter: revision.row.letter,
+    kind: body.kind,
+    ...place,
+    stance: body.kind === 'critique' ? body.stance : null,
+    text: body.text,
+    why: body.kind === 'critique' ? body.why : '',
+    authorId: person.id,
+    settledBy: null,
+    state: 'shown',
+    editedAt: null,
+  });
+  comment.createdAt = deps.now();
+  await deps.db.transaction(async (manager) => {
+    await manager.getRepository(CommentEntity).insert(comment);
+    await tellOfComment(manager, comment, plan, person, deps.now());
+  });
   return presentOne(deps, comment, plan, person);
 }
 
@@ -270,6 +274,9 @@ export async function settle(
   )
     throw missing('That answer');
   comment.settledBy = answerId;
-  await deps.db.getRepository(CommentEntity).save(comment);
+  await deps.db.transaction(async (manager) => {
+    await manager.getRepository(CommentEntity).save(comment);
+    await tellOfSettling(manager, comment, plan, deps.now());
+  });
   return presentOne(deps, comment, plan, person);
 }

@@ -1,5 +1,5 @@
 import { uncertaintyOf } from '../../measure';
-import { type Sense } from '../document';
+import { type Kind, type Sense } from '../document';
 import { type PlanModel } from '../model';
 import { type Change } from '../compare';
 import { type CutFigure, type Meaning, type NoticeItem } from './types';
@@ -28,7 +28,16 @@ export function cutDimension(
   const low = now.band?.low ?? now.value.x - play;
   const high = now.band?.high ?? now.value.x + play;
   const off = offBand(made, low, high);
-  return { of: 'value', made, read: read !== null, low, high, off, sense: now.dimension.sense };
+  return {
+    of: 'value',
+    made,
+    read: read !== null,
+    low,
+    high,
+    off,
+    sense: now.dimension.sense,
+    kind: now.kind,
+  };
 }
 
 /** A size that is one symbol and nothing else was made to that dimension's reading. */
@@ -49,7 +58,8 @@ export function cutPart(change: Change, before: PlanModel): CutFigure[] {
     const [made, low, high] = [read ?? was.x, now.low ?? now.x, now.high ?? now.x];
     const off = offBand(made, low, high);
     const sense: Sense = 'outside';
-    return [{ of, made, read: read !== null, low, high, off, sense }];
+    const kind: Kind = 'length';
+    return [{ of, made, read: read !== null, low, high, off, sense, kind }];
   });
 }
 

@@ -1,5 +1,5 @@
 import { type Change } from '../compare';
-import { type Sense } from '../document';
+import { type Kind, type Sense } from '../document';
 
 /**
  * What a change means at one bench, the worst first.
@@ -48,6 +48,7 @@ export interface CutFigure {
   /** Signed: above 0 it is over by so much, below 0 under; 0 inside. */
   off: number;
   sense: Sense;
+  kind: Kind;
 }
 
 export interface NoticeItem {

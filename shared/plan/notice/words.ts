@@ -1,5 +1,4 @@
 import { displayMm, displayValue, type DisplayPreference } from '../../measure';
-import { type PlanModel } from '../model';
 import { type CutFigure, type Meaning, type NoticeItem, type StockNeed } from './types';
 
 const short: Record<Meaning, string> = {
@@ -19,10 +18,8 @@ const short: Record<Meaning, string> = {
 /** A meaning in two or three words. */
 export const meaningWord = (means: Meaning): string => short[means];
 
-const amount = (figure: CutFigure, pref: DisplayPreference, model: PlanModel, id: string) => {
-  const kind = model.dimensions.get(id)?.kind ?? 'length';
-  return displayValue(Math.abs(figure.off), kind, pref, true).text.replace(/^\+/, '');
-};
+const amount = (figure: CutFigure, pref: DisplayPreference) =>
+  displayValue(Math.abs(figure.off), figure.kind, pref, true).text.replace(/^\+/, '');
 
 /** The stock a part made again takes, as `B × 2 from birch ply: 300 × 120 × 18 mm`. */
 export function needText(need: StockNeed, pref: DisplayPreference): string {
@@ -33,7 +30,10 @@ export function needText(need: StockNeed, pref: DisplayPreference): string {
   return `${need.mark}${times}${need.stock ? ` from ${need.stock}` : ''}: ${size}`;
 }
 
-function workText(item: NoticeItem, figure: CutFigure, off: string): string {
+/** What of an item the words need. */
+type Described = Pick<NoticeItem, 'means' | 'cure' | 'figures' | 'needs' | 'assumed'>;
+
+function workText(item: Described, figure: CutFigure, off: string): string {
   const over = figure.off > 0 ? 'over' : 'under';
   const where = figure.of === 'value' ? '' : ` in ${figure.of}`;
   const said = `${off} ${over}${where}`;
@@ -45,10 +45,10 @@ function workText(item: NoticeItem, figure: CutFigure, off: string): string {
 }
 
 /** What an item asks of the builder, in a sentence or two. */
-export function describeItem(item: NoticeItem, model: PlanModel, pref: DisplayPreference): string {
+export function describeItem(item: Described, pref: DisplayPreference): string {
   const worst = [...item.figures].sort((a, b) => Math.abs(b.off) - Math.abs(a.off))[0];
   const tail = item.assumed ? ' Nothing was read: measure before you trust this.' : '';
-  const off = worst ? amount(worst, pref, model, item.change.elementId) : '';
+  const off = worst ? amount(worst, pref) : '';
   switch (item.means) {
     case 'cannot': {
       const over = worst && worst.off > 0 ? 'over' : 'under';

@@ -10,6 +10,7 @@ import { type Deps } from '../../../server/deps';
 import { readEnv } from '../../../server/env';
 import { hashPassword } from '../../../server/features/accounts/passwords';
 import { startWork } from '../../../server/features/work';
+import { startNoticeWork } from '../../../server/features/notices/work';
 import { startJobs } from '../../../server/jobs/jobs';
 import { databaseUrl, startMailCatcher, templateName, type MailCatcher } from './services';
 import { makeStorage } from '../../../server/storage/storage';
@@ -28,7 +29,11 @@ export interface TestApp {
 }
 
 /** The real application on services of its own: PostgreSQL, object store, mail. */
-export async function testApp({ rateFactor = 10_000, mediaWork = false } = {}): Promise<TestApp> {
+export async function testApp({
+  rateFactor = 10_000,
+  mediaWork = false,
+  noticeWork = false,
+} = {}): Promise<TestApp> {
   const shared = process.env.SCANTLING_TEST_DATABASE;
   const store = process.env.SCANTLING_TEST_STORE;
   if (!shared || !store) throw new Error('API tests run as a Jest project: npm run test:api');
@@ -53,6 +58,7 @@ export async function testApp({ rateFactor = 10_000, mediaWork = false } = {}): 
   const deps: Deps = { env, db, storage, jobs, log, now: () => new Date() };
   const app = createApp(deps);
   if (mediaWork) await startWork(deps);
+  if (noticeWork) await startNoticeWork(deps);
   const passwordHash = await hashPassword(password);
   const agent = () => request.agent(app).set('X-Scantling', '1');
   return {
