@@ -1,4 +1,10 @@
 import { type AnyAid } from './aid';
+import { taperAid } from './taper/taper';
+import { squarenessAid } from './squareness/squareness';
+import { runnerAid } from './runner/runner';
+import { mitreAid } from './mitre/mitre';
+import { equalSpacingAid } from './equal-spacing/equal-spacing';
+import { arcAid } from './arc/arc';
 import { bladeSpeedAid } from './blade-speed/blade-speed';
 import { boardFeetAid } from './board-feet/board-feet';
 import { dressedSizeAid } from './dressed-size/dressed-size';
@@ -22,7 +28,13 @@ import { woodWeightAid } from './wood-weight/wood-weight';
 export const aids: readonly AnyAid[] = [
   fiveCutAid,
   shimStackAid,
+  runnerAid,
   repeatedCutsAid,
+  squarenessAid,
+  equalSpacingAid,
+  arcAid,
+  mitreAid,
+  taperAid,
   MoistureAid,
   woodMovementAid,
   panelGapAid,
