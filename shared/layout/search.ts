@@ -9,9 +9,9 @@ export const tuning = {
   /** Share of slots passed over. */
   blink: 0.03,
   /** Length of the late acceptance's memory. */
-  history: 200,
+  history: 100,
   /** Most branches taken off in one move. */
-  ruins: 8,
+  ruins: 20,
   /** Share of moves that clear a sheet where sizes differ. */
   swap: 0.1,
   choice: 1 as Choice,
