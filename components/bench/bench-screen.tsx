@@ -10,7 +10,8 @@ import { useDropStrays } from '../service-worker/use-kept';
 import { Banner } from '../ui/banner';
 import { Button } from '../ui/button';
 import { Heading } from '../ui/heading';
-import { Page, Row, Rule, Stack } from '../ui/layout';
+import { Page, Row, Rule, Section, Stack } from '../ui/layout';
+import { Link } from '../ui/link';
 import { Progress } from '../ui/progress';
 import { EmptyState, ErrorState, LoadingLines } from '../ui/states';
 import { Text } from '../ui/text';
@@ -19,12 +20,23 @@ import { useCopies } from './bench-queries';
 /** One's bench copies. */
 export function BenchScreen() {
   return (
-    <SignedIn
-      title="Bench"
-      what="A bench copy keeps your readings, ticks and notes, and works with no signal."
-    >
-      {(me) => <Copies personId={me.id} />}
-    </SignedIn>
+    <>
+      <SignedIn
+        title="Bench"
+        what="A bench copy keeps your readings, ticks and notes, and works with no signal."
+      >
+        {(me) => <Copies personId={me.id} />}
+      </SignedIn>
+      <Page>
+        <Section>
+          <Heading level={2}>Bench aids</Heading>
+          <Text>
+            <Link href="/aids">The shop’s arithmetic</Link>: wood movement, screws, lumber, saw
+            set-up, noise, glue. No account and no signal needed.
+          </Text>
+        </Section>
+      </Page>
+    </>
   );
 }
 

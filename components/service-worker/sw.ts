@@ -35,6 +35,7 @@ const dynamicPages: readonly [RegExp, string][] = [
   [/^\/bench\/[^/]+\/?$/, '/bench/[copyId].html'],
   [/^\/drafting\/[^/]+\/?$/, '/drafting/[planId].html'],
   [/^\/cases\/[^/]+\/?$/, '/cases/[caseId].html'],
+  [/^\/aids\/[^/]+\/?$/, '/aids/[aid].html'],
 ];
 
 /** Other spellings of an address under which its file may be kept: a folder's page, brackets as they are. */

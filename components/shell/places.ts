@@ -20,7 +20,7 @@ export interface Place {
 /** Where one can go, in order. */
 export const places: readonly Place[] = [
   { key: 'plans', label: 'Plans', icon: 'plans', href: '/', also: /^\/plans(\/|$)/ },
-  { key: 'bench', label: 'Bench', icon: 'bench', href: '/bench' },
+  { key: 'bench', label: 'Bench', icon: 'bench', href: '/bench', also: /^\/aids(\/|$)/ },
   { key: 'drafting', label: 'Drafting', icon: 'drafting', href: '/drafting', role: 'creator' },
   { key: 'shop-card', label: 'Shop card', icon: 'shopcard', href: '/shop-card' },
   {

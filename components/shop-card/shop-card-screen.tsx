@@ -65,6 +65,12 @@ function CardForm({ version, start }: { version: number; start: ShopCard }) {
         onChange={(kerf) => setCard({ ...card, kerf })}
         help="As 1/8 in or 2.6 mm"
       />
+      <TextField
+        label="Drills on hand"
+        value={card.drills}
+        onChange={(drills) => setCard({ ...card, drills })}
+        help="As 1/16 in, 5/64 in, 3 mm; the aid for screw holes picks from them"
+      />
       <Machines card={card} setCard={setCard} />
       <UsualStock card={card} setCard={setCard} />
       <Button

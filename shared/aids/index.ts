@@ -10,7 +10,7 @@ import { boardFeetAid } from './board-feet/board-feet';
 import { dressedSizeAid } from './dressed-size/dressed-size';
 import { fiveCutAid } from './five-cut/five-cut';
 import { glueWaitAid } from './glue-wait/glue-wait';
-import { MoistureAid } from './moisture/moisture';
+import { moistureAid } from './moisture/moisture';
 import { noiseDoseAid } from './noise-dose/noise-dose';
 import { panelGapAid } from './panel-gap/panel-gap';
 import { repeatedCutsAid } from './repeated-cuts/repeated-cuts';
@@ -35,7 +35,7 @@ export const aids: readonly AnyAid[] = [
   arcAid,
   mitreAid,
   taperAid,
-  MoistureAid,
+  moistureAid,
   woodMovementAid,
   panelGapAid,
   screwHolesAid,

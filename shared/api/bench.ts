@@ -155,6 +155,24 @@ export const shopCardSchema = z.object({
   kerf: z.string().max(60).default(''),
   /** Last values of taken dimensions by symbol, to prefill forms. */
   usual: z.record(z.string().max(60), z.string().max(60)).default({}),
+  /** Drills on hand as typed: "1/16 in, 5/64 in, 3 mm". */
+  drills: z.string().max(2000).default(''),
+  /** Set-ups worked out with bench aids: what was typed, what it said. */
+  setups: z
+    .array(
+      z.object({
+        id,
+        aid: z.string().max(40),
+        units: z.enum(['mm', 'in']),
+        machine: z.string().max(120).default(''),
+        /** Day, as 2026-12-01. */
+        on: z.string().max(10),
+        values: z.record(z.string().max(60), z.string().max(200)),
+        said: z.string().max(600),
+      }),
+    )
+    .max(200)
+    .default([]),
 });
 export type ShopCard = z.infer<typeof shopCardSchema>;
 const shopCardResponse = z.object({ version: z.number().int(), card: shopCardSchema });

@@ -17,8 +17,9 @@ export const glueWaitInput = z.object({
     .default({}),
   /** Minutes the person needs to bring it together. */
   assembly: z.number().min(0).max(1_440).optional(),
-  /** Glued face, mm², and the wood: for the clamps. */
-  area: z.number().positive().max(10_000_000).optional(),
+  /** Glued face, mm, and the wood: for the clamps. */
+  faceLength: z.number().positive().max(10_000).optional(),
+  faceWidth: z.number().positive().max(10_000).optional(),
   wood: z.enum(['soft', 'medium', 'hard']).default('medium'),
 });
 
@@ -48,7 +49,9 @@ export function workGlueWait(input: z.output<typeof glueWaitInput>): Outcome<Glu
   const family = glueFamilies.find(({ id }) => id === input.family);
   if (!family)
     return refused('family', 'This family of glue is not in the table.', 'Use the label alone.');
-  const { label, celsius, assembly, area } = input;
+  const { label, celsius, assembly, faceLength, faceWidth } = input;
+  const area =
+    faceLength !== undefined && faceWidth !== undefined ? faceLength * faceWidth : undefined;
   const least = label.least ?? family.least;
   if (!(celsius >= -50 && celsius <= 60))
     return refused('celsius', 'A shop between −50 and 60 °C is expected.', 'Check the unit.');

@@ -54,7 +54,7 @@ export function workMoisture(input: z.output<typeof moistureInput>): Outcome<Moi
 }
 
 /** The aid "Moisture content". */
-export const MoistureAid = defineAid({
+export const moistureAid = defineAid({
   id: 'moisture',
   title: 'Moisture content',
   what: 'The moisture wood comes to in a room, from temperature and humidity.',

@@ -131,7 +131,8 @@ const aids = [
     family: fc.constantFrom('pva-white', 'epoxy'),
     celsius: figure,
     label: fc.record({ open: maybe, clamp: maybe }),
-    area: maybe,
+    faceLength: maybe,
+    faceWidth: maybe,
   }),
 ];
 

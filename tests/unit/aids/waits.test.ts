@@ -149,12 +149,12 @@ describe('glue waits', () => {
     const psi = (0.45359237 * 9.80665) / 25.4 ** 2;
     expect(clampPressure[wood][0]).toBeCloseTo(low * psi, 2);
     expect(clampPressure[wood][1]).toBeCloseTo(high * psi, 2);
-    const [least] = wait({ wood, area: 10_000 }).force ?? [0];
+    const [least] = wait({ wood, faceLength: 100, faceWidth: 100 }).force ?? [0];
     expect(least).toBeCloseTo(clampPressure[wood][0] * 10, 9);
   });
 
   it('asks no such force of epoxy, which fills gaps under light pressure', () => {
-    expect(wait({ family: 'epoxy', area: 10_000 }).force).toBeNull();
+    expect(wait({ family: 'epoxy', faceLength: 100, faceWidth: 100 }).force).toBeNull();
   });
 
   it('compares the assembly with the open time', () => {

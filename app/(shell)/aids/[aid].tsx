@@ -1,0 +1,1 @@
+export { AidScreen as default } from '../../../components/aids/aid-screen';

@@ -1,0 +1,1 @@
+export { AidsScreen as default } from '../../../components/aids/aids-screen';
